@@ -1,0 +1,17 @@
+#pragma once
+/// The section `tests:`.
+
+#include <vector>
+
+#include "cases/input/case.hpp"
+#include "cases/input/located_yaml.hpp"
+#include "cases/input/section_reader.hpp"
+
+namespace ringwright::cases {
+
+/// @param where place of the key `tests`
+/// @return what could be read; complete if no problem was reported
+std::vector<Test> read_tests(const LocatedNode& node, const Place& where, const Key& grammar,
+                             Reading& reading);
+
+}  // namespace ringwright::cases
