@@ -1,0 +1,83 @@
+#pragma once
+/// The answer to one virtual test: what every screen, file and page is made from.
+/// Each printed figure is a Figure: a value and the numerical error the program estimated for it.
+
+#include <optional>
+#include <string>
+#include <vector>
+
+#include "models/record/record.hpp"
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::postprocess {
+
+struct Figure {
+  double value = 0.0;
+  double error = 0.0;  ///< estimated numerical error, absolute, same unit as value
+  /// |error / value|
+  double relative_error() const {
+    return value != 0.0 ? (error < 0 ? -error : error) / (value < 0 ? -value : value) : 0.0;
+  }
+};
+
+/// What is asked of one test. Conductivities inside `setup` are at test temperature.
+struct Question {
+  solver::TestSetup setup;  ///< `duration` = longest; times and snapshots are filled in by answer()
+  double reading_interval = 0.0;  ///< [s]
+  int stop_readings = 0;          ///< stop rule: last n readings ...
+  double stop_within = 0.0;       ///< ... within this fraction of their mean; 0 readings: no rule
+  double assumed_alpha_star = 0;  ///< the crew's alpha* [1/m]
+  double viscosity_ratio = 1.0;   ///< mu(test temperature) / mu(20 degC): K20 = K * ratio
+  double accuracy = 0.01;         ///< asked for, relative, every printed figure
+  int threads = 1;  ///< companion runs may go side by side; never changes a bit of the result
+};
+
+/// Bias of the three readings of the same rate; reported Kfs over true Kfs (both at test
+/// temperature).
+struct ReadsX {
+  Figure rate_as_kfs;          ///< the rate itself taken as Kfs
+  Figure one_head;             ///< Reynolds & Elrick 1990, assumed alpha*
+  Figure one_head_own_lambda;  ///< the same with the soil's own capillary length: not available to
+                               ///< a crew
+};
+
+struct LadderRow {
+  double time = 0.0;     ///< [s]
+  Figure rate;           ///< mean over the reading interval that ends here [m/s], test temperature
+  Figure soil_volume;    ///< into the ground [m3]
+  Figure supply_volume;  ///< soil + pond (filling) [m3]
+  ReadsX reads;
+  Figure above_steady;      ///< rate over steady rate minus 1 [-]
+  bool stops_here = false;  ///< the stop rule ends the test here
+};
+
+struct TimeToSteady {
+  double time = 0.0;    ///< last time the flow is more than 5 % from steady [s]
+  bool beyond = false;  ///< true: not reached, time is the limit looked at
+};
+
+struct Answer {
+  Question question;
+  models::Record record;          ///< readings up to the stop
+  std::vector<LadderRow> ladder;  ///< ascending; one row has stops_here
+  bool stop_rule_met = true;      ///< false: ended at the longest time allowed
+  Figure steady_rate;             ///< [m/s]
+  ReadsX steady_reads;
+  TimeToSteady time_to_steady;
+  double peak_flow = 0.0;              ///< largest mean soil intake over 60 s, filling apart [m3/s]
+  double filling_volume = 0.0;         ///< pond [m3]
+  Figure wetted_depth;                 ///< at the stop [m]
+  Figure wetted_beyond_wall;           ///< at the stop [m]
+  double initial_water_content = 0.0;  ///< [-]
+  double initial_saturation = 0.0;     ///< effective saturation Se [-]
+  double own_capillary_length = 0.0;   ///< lambda of the soil between initial head and 0 [m]
+  double worst_relative_error = 0.0;   ///< largest over all promised figures [-]
+  bool accuracy_met = false;
+  int refinements = 0;
+  solver::TestRun run;         ///< the finest run, with fields
+  double balance_error = 0.0;  ///< of that run, over throughput [-]
+  long total_steps = 0;        ///< over all companion runs
+  bool interrupted = false;  ///< stopped by the user; what is there is valid up to the last sample
+};
+
+}  // namespace ringwright::postprocess

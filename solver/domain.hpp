@@ -1,0 +1,26 @@
+#pragma once
+/// How much ground a test needs around it.
+
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::solver {
+
+struct Domain {
+  double radius = 0.0;  ///< [m]
+  double depth = 0.0;   ///< [m]
+};
+
+/// Depth that one-dimensional infiltration wets in time t [m], an upper estimate:
+/// S sqrt(t) + Ks t over the fillable content, S^2 = 2 Ks dtheta (H + lambda)
+/// (Green & Ampt 1911 in the form of Philip 1957).
+double wetted_depth_estimate(const TestSetup& setup, double capillary_length, double t);
+
+/// Domain of the transient test: three times what gravity and capillarity can wet, below
+/// the wall and (without gravity) beside it.
+Domain transient_domain(const TestSetup& setup, double capillary_length);
+
+/// Domain of the steady state, whose far field decays slowly in fine soil: the flow is
+/// within 0.1 % of that of the unbounded ground.
+Domain steady_domain(const models::SingleRing& ring, double capillary_length);
+
+}  // namespace ringwright::solver

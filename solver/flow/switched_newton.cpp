@@ -1,0 +1,92 @@
+#include "solver/flow/switched_newton.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+namespace ringwright::solver {
+namespace {
+
+constexpr double kWorstContraction = 0.3;  // slower than this: new matrix
+constexpr double kLargestCoefficientChange = 1.67;
+
+}  // namespace
+
+SwitchedNewton::SwitchedNewton(FlowSystem& flow, const NewtonTolerances& tolerances)
+    : flow_(flow),
+      tolerances_(tolerances),
+      klu_(flow.pattern()),
+      residual_(static_cast<std::size_t>(flow.cells())),
+      step_(residual_.size()),
+      matrix_(flow.pattern().rows.size()) {}
+
+double SwitchedNewton::residual(std::span<const double> W, std::span<const double> W_rate, double c,
+                                std::span<const double> u) {
+  flow_.set_state(u);
+  flow_.net_outflow(residual_);
+  const auto V = flow_.volume();
+  double worst = 0.0;
+  for (std::size_t i = 0; i < residual_.size(); ++i) {
+    residual_[i] += V[i] * (W_rate[i] + c * (flow_.storage(static_cast<int>(i)) - W[i]));
+    const double size = std::abs(residual_[i]) / (c * V[i]);
+    if (!(size <= worst)) worst = size;  // a NaN counts as worst
+  }
+  return worst;
+}
+
+bool SwitchedNewton::refresh(double c) {
+  std::fill(matrix_.begin(), matrix_.end(), 0.0);
+  flow_.add_jacobian(matrix_);
+  const auto V = flow_.volume();
+  const std::vector<int>& diagonal = flow_.pattern().diagonal;
+  for (std::size_t i = 0; i < V.size(); ++i)
+    matrix_[static_cast<std::size_t>(diagonal[i])] +=
+        c * V[i] * flow_.storage_slope(static_cast<int>(i));
+  matrix_c_ = c;
+  return klu_.factorise(matrix_);
+}
+
+double SwitchedNewton::update(std::span<double> u) const {
+  const double driest = flow_.table().driest(), entry = flow_.table().entry();
+  double largest = 0.0;
+  for (std::size_t i = 0; i < u.size(); ++i) {
+    const double old = u[i];
+    double next = old - step_[i];
+    largest = std::max(largest, std::abs(step_[i]));
+    // Water content stays positive: keep a tenth of the way to the driest state.
+    next = std::max(next, driest + 0.1 * (old - driest));
+    // The storage slope jumps at saturation: land near the kink when crossing it.
+    if ((old < entry) != (next < entry)) next = entry + 0.3 * (next - entry);
+    u[i] = next;
+  }
+  return largest;
+}
+
+bool SwitchedNewton::solve(std::span<const double> W, std::span<const double> W_rate, double c,
+                           std::span<double> u) {
+  last_iterations_ = 0;
+  double defect = residual(W, W_rate, c, u);
+  const double change = matrix_c_ > 0.0 ? std::max(c / matrix_c_, matrix_c_ / c) : 1e300;
+  bool stale = change > kLargestCoefficientChange;
+  double previous = 0.0;
+  for (int k = 0; k < tolerances_.iterations; ++k) {
+    if (stale && !refresh(c)) return false;
+    stale = false;
+    std::copy(residual_.begin(), residual_.end(), step_.begin());
+    klu_.solve(step_);
+    const double largest = update(u);
+    ++iterations_, ++last_iterations_;
+    if (!(largest < 1e12)) return matrix_c_ = 0.0, false;
+    const double contraction = k > 0 ? largest / previous : 0.0;
+    const double old_defect = defect;
+    defect = residual(W, W_rate, c, u);
+    const double remaining =
+        k > 0 && contraction < 0.9 ? largest * contraction / (1 - contraction) : largest;
+    if (defect < tolerances_.storage && remaining < tolerances_.unknown) return true;
+    stale = contraction > kWorstContraction || !(defect < kWorstContraction * old_defect);
+    previous = largest;
+  }
+  matrix_c_ = 0.0;
+  return false;
+}
+
+}  // namespace ringwright::solver

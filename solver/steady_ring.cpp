@@ -1,0 +1,64 @@
+#include "solver/steady_ring.hpp"
+
+#include <algorithm>
+#include <cmath>
+#include <string>
+
+#include "solver/failure.hpp"
+#include "solver/flow/curve_table.hpp"
+#include "solver/flow/flow_system.hpp"
+#include "solver/flow/steady_newton.hpp"
+#include "solver/mesh/ring_mesh.hpp"
+
+namespace ringwright::solver {
+namespace {
+
+enum Patch : std::size_t { kRing, kOutside, kBottom, kSide, kPatches };
+
+// Start: the steady point source in a Gardner soil (Philip 1968), capped near the ring.
+std::vector<double> first_potentials(const SteadyRing& p, const CellsAndFaces& mesh,
+                                     const CurveTable& table) {
+  const double lambda = table.capillary_length();
+  const double top = table.potential_of_head(p.pond_head);
+  std::vector<double> Phi;
+  for (const auto& centre : mesh.drawing.centres) {
+    const double rho = std::hypot(centre[0], centre[1]);
+    const double near = std::min(1.0, p.ring.radius / std::max(rho, 1e-12));
+    Phi.push_back(top * std::max(near * std::exp(-(rho + centre[1]) / (2 * lambda)), 1e-12));
+  }
+  return Phi;
+}
+
+}  // namespace
+
+SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
+                       std::shared_ptr<const CurveTable> table, const Domain& domain) {
+  const CellsAndFaces mesh = ring_mesh(problem.ring, domain, resolution);
+  std::vector<Condition> conditions(kPatches);
+  conditions[kRing] = Condition::constant(Boundary::head, problem.pond_head);
+  conditions[kOutside].kind = Boundary::seepage;
+  conditions[kBottom].kind = Boundary::free_drainage;
+  std::vector<double> Phi = first_potentials(problem, mesh, *table);
+  FlowSystem flow(mesh, problem.soil, std::move(table), std::move(conditions));
+  const SteadyResult found = solve_steady(flow, Phi);
+  if (!found.converged)
+    throw SolverFailure(
+        "no steady flow found after " + std::to_string(found.iterations) + " Newton iterations",
+        0.0, 0.0, {});
+  const auto out = flow.patch_outflow();
+  SteadyFlow result;
+  result.ring_flow = -out[kRing];
+  result.seepage_flow = out[kOutside];
+  result.iterations = found.iterations;
+  result.cells = flow.cells();
+  result.balance_error = std::abs(out[kRing] + out[kOutside] + out[kBottom]) / result.ring_flow;
+  return result;
+}
+
+SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
+                       std::shared_ptr<const CurveTable> table) {
+  const Domain domain = steady_domain(problem.ring, table->capillary_length());
+  return steady_flow(problem, resolution, std::move(table), domain);
+}
+
+}  // namespace ringwright::solver

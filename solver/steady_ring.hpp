@@ -1,0 +1,42 @@
+#pragma once
+/// Steady flow out of a ring, found as the root of the flow equation, not as a long run.
+///
+/// The unknown is the flux potential Phi of each cell. In it the capillary flow is linear and
+/// only gravity, K(Phi), is not (for a Gardner soil it is linear too), so that Newton's method
+/// converges from a rough start; where it does not, a pseudo-time term is added and taken back.
+/// The far field is drained and dry: the steady flow does not depend on the moisture before
+/// the test.
+
+#include <memory>
+
+#include "models/ring/single_ring.hpp"
+#include "models/soil/curves.hpp"
+#include "solver/domain.hpp"
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::solver {
+
+class CurveTable;
+
+struct SteadyRing {
+  models::Soil soil;
+  models::SingleRing ring;
+  double pond_head = 0.0;  ///< [m]
+};
+
+struct SteadyFlow {
+  double ring_flow = 0.0;      ///< into the soil [m3/s]
+  double seepage_flow = 0.0;   ///< out of the surface outside the ring [m3/s]
+  double balance_error = 0.0;  ///< |in - out| / in [-]
+  int iterations = 0;
+  int cells = 0;
+};
+
+/// @throws SolverFailure when no steady state is found
+SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
+                       std::shared_ptr<const CurveTable> table);
+/// The same on a given domain, to see what the domain does.
+SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
+                       std::shared_ptr<const CurveTable> table, const Domain& domain);
+
+}  // namespace ringwright::solver

@@ -1,0 +1,286 @@
+#include "solver/time/integrator.hpp"
+
+#include <algorithm>
+#include <cmath>
+#include <exception>
+#include <string>
+#include <vector>
+
+#include "solver/failure.hpp"
+#include "solver/flow/switched_newton.hpp"
+#include "solver/time/sundials_handles.hpp"
+
+namespace ringwright::solver {
+namespace {
+
+// Newton's tolerances as parts of the error allowed per step. The defect of the storage is
+// what the water balance is made of, hence the small share.
+constexpr double kStorageShare = 0.002;
+constexpr double kUnknownTolerance = 2e-5;  // [m]
+constexpr double kNoWeight = 1e-30;         // totals do not take part in the error test
+constexpr int kMaxOrder = 3;
+constexpr double kLargestExtrapolation = 0.5;  // of u, per step [m]
+
+}  // namespace
+
+struct Integrator::Impl {
+  FlowSystem& flow;
+  SwitchedNewton newton;
+  double tolerance;
+  std::size_t n, m;  // cells, patches
+
+  ContextHandle context = make_context();
+  VectorHandle y, yp, work;
+  NonlinearSolverHandle nonlinear;
+  IdaHandle ida;
+
+  std::vector<double> u, u_before, u_trial;
+  double t = 0.0, t_before = 0.0, t_start = 0.0;
+  double u_rate_span = 0.0;  // length of the step from u_before to u; 0: none yet
+  std::exception_ptr error;
+  IntegratorStatistics earlier;  // of legs before the last start
+  long newton_failures = 0;
+  int call_failures = 0, call_iterations = 0;
+  bool initialised = false;
+
+  Impl(FlowSystem& f, double theta_tolerance)
+      : flow(f),
+        newton(f, {.storage = kStorageShare * theta_tolerance, .unknown = kUnknownTolerance}),
+        tolerance(theta_tolerance),
+        n(static_cast<std::size_t>(f.cells())),
+        m(static_cast<std::size_t>(f.patches())),
+        u(n),
+        u_before(n),
+        u_trial(n) {
+    const auto size = static_cast<sunindextype>(n + m);
+    y = make_vector(size, context.get());
+    yp = make_vector(size, context.get());
+    work = make_vector(size, context.get());
+    make_nonlinear_solver();
+  }
+
+  static Impl& of(SUNNonlinearSolver s) { return *static_cast<Impl*>(s->content); }
+  double* data(N_Vector v) const { return N_VGetArrayPointer(v); }
+
+  void make_nonlinear_solver();
+  void make_ida();
+  int solve_step(N_Vector correction);
+  void guess(double t_new, std::span<const double> W);
+  void check(int flag, const char* what) const;
+  [[noreturn]] void fail(int flag) const;
+};
+
+void Integrator::Impl::make_nonlinear_solver() {
+  SUNNonlinearSolver s = SUNNonlinSolNewEmpty(context.get());
+  if (!s) throw std::bad_alloc();
+  nonlinear.reset(s);
+  s->content = this;
+  s->ops->gettype = [](SUNNonlinearSolver) { return SUNNONLINEARSOLVER_ROOTFIND; };
+  s->ops->initialize = [](SUNNonlinearSolver) { return static_cast<int>(SUN_NLS_SUCCESS); };
+  s->ops->setsysfn = [](SUNNonlinearSolver, SUNNonlinSolSysFn) {
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+  s->ops->setctestfn = [](SUNNonlinearSolver, SUNNonlinSolConvTestFn, void*) {
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+  s->ops->setmaxiters = [](SUNNonlinearSolver, int) { return static_cast<int>(SUN_NLS_SUCCESS); };
+  s->ops->getnumiters = [](SUNNonlinearSolver self, long* count) {
+    *count = of(self).call_iterations;
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+  s->ops->getcuriter = [](SUNNonlinearSolver self, int* count) {
+    *count = of(self).call_iterations;
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+  s->ops->getnumconvfails = [](SUNNonlinearSolver self, long* count) {
+    *count = of(self).call_failures;
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+  s->ops->solve = [](SUNNonlinearSolver self, N_Vector, N_Vector correction, N_Vector, realtype,
+                     booleantype, void*) {
+    Impl& impl = of(self);
+    try {  // nothing may be thrown across the C library
+      return impl.solve_step(correction);
+    } catch (...) {
+      impl.error = std::current_exception();
+      return -1;
+    }
+  };
+  s->ops->free = [](SUNNonlinearSolver self) {
+    SUNNonlinSolFreeEmpty(self);
+    return static_cast<int>(SUN_NLS_SUCCESS);
+  };
+}
+
+void Integrator::Impl::make_ida() {
+  ida.reset(IDACreate(context.get()));
+  if (!ida) throw std::bad_alloc();
+  // The residual function is never called: the nonlinear solver above forms its own.
+  const auto unused = [](realtype, N_Vector, N_Vector, N_Vector, void*) { return -1; };
+  const auto weights = [](N_Vector, N_Vector w, void* self) {
+    const Impl& impl = *static_cast<Impl*>(self);
+    double* v = impl.data(w);
+    std::fill_n(v, impl.n, 1.0 / impl.tolerance);
+    std::fill_n(v + impl.n, impl.m, kNoWeight);
+    return 0;
+  };
+  const auto silent = [](int, const char*, const char*, char*, void*) {};
+  check(IDASetErrHandlerFn(ida.get(), silent, nullptr), "IDASetErrHandlerFn");
+  check(IDAInit(ida.get(), unused, t, y.get(), yp.get()), "IDAInit");
+  check(IDASetUserData(ida.get(), this), "IDASetUserData");
+  check(IDAWFtolerances(ida.get(), weights), "IDAWFtolerances");
+  check(IDASetMaxOrd(ida.get(), kMaxOrder), "IDASetMaxOrd");
+  check(IDASetMaxNumSteps(ida.get(), 20000), "IDASetMaxNumSteps");
+  check(IDASetMaxConvFails(ida.get(), 30), "IDASetMaxConvFails");
+  check(IDASetMaxErrTestFails(ida.get(), 30), "IDASetMaxErrTestFails");
+  check(IDASetNonlinearSolver(ida.get(), nonlinear.get()), "IDASetNonlinearSolver");
+  initialised = true;
+}
+
+// Dry cells follow IDA's predicted water content (u is affine in it), wet cells go on in a
+// straight line.
+void Integrator::Impl::guess(double t_new, std::span<const double> W) {
+  const CurveTable& table = flow.table();
+  const double ratio = u_rate_span > 0.0 ? std::min((t_new - t) / u_rate_span, 3.0) : 0.0;
+  for (std::size_t i = 0; i < n; ++i) {
+    if (u[i] < table.switch_point()) {
+      const double Se = W[i] / flow.fillable();
+      const double next = table.u_of_saturation(Se);
+      const double floor = table.driest() + 0.1 * (u[i] - table.driest());
+      u_trial[i] = std::clamp(next, floor, std::max(table.entry(), u[i]));
+    } else {
+      const double change = (u[i] - u_before[i]) * ratio;
+      double next = u[i] + std::clamp(change, -kLargestExtrapolation, kLargestExtrapolation);
+      if ((u[i] < table.entry()) != (next < table.entry())) next = u[i];
+      u_trial[i] = next;
+    }
+  }
+}
+
+int Integrator::Impl::solve_step(N_Vector correction) {
+  realtype t_new = 0.0, c = 0.0;
+  N_Vector W_pred, Wp_pred, unused_y, unused_yp, unused_res;
+  void* unused_data;
+  IDAGetNonlinearSystemData(ida.get(), &t_new, &W_pred, &Wp_pred, &unused_y, &unused_yp,
+                            &unused_res, &c, &unused_data);
+  const std::span<const double> W(data(W_pred), n), W_rate(data(Wp_pred), n);
+  flow.set_time(t_new);
+  guess(t_new, W);
+  call_failures = 0;
+  const bool converged = newton.solve(W, W_rate, c, u_trial);
+  call_iterations = newton.last_iterations();
+  if (!converged) {
+    call_failures = 1;
+    ++newton_failures;
+    return SUN_NLS_CONV_RECVR;
+  }
+  double* out = data(correction);
+  for (std::size_t i = 0; i < n; ++i) out[i] = flow.storage(static_cast<int>(i)) - W[i];
+  const double* total_rate = data(Wp_pred) + n;
+  for (std::size_t k = 0; k < m; ++k) out[n + k] = (flow.patch_outflow()[k] - total_rate[k]) / c;
+  return SUN_NLS_SUCCESS;
+}
+
+void Integrator::Impl::check(int flag, const char* what) const {
+  if (flag < 0) throw std::runtime_error(std::string(what) + " failed");
+}
+
+void Integrator::Impl::fail(int flag) const {
+  if (error) std::rethrow_exception(error);
+  char* name = IDAGetReturnFlagName(flag);
+  const std::string reason = name ? name : "unknown";
+  std::free(name);
+  realtype step = 0.0;
+  IDAGetCurrentStep(ida.get(), &step);
+  const auto defects = newton.last_defects();
+  std::vector<WorstCell> cells;
+  for (std::size_t i = 0; i < n; ++i)
+    cells.push_back({static_cast<int>(i),
+                     {},
+                     flow.table().head_of_u(u_trial[i]),
+                     std::abs(defects[i]) / (flow.volume()[i] * tolerance)});
+  const auto count = static_cast<std::ptrdiff_t>(std::min<std::size_t>(5, n));
+  std::partial_sort(cells.begin(), cells.begin() + count, cells.end(),
+                    [](const WorstCell& a, const WorstCell& b) { return a.size > b.size; });
+  cells.resize(static_cast<std::size_t>(count));
+  throw SolverFailure(
+      "the time step became too small or the iteration did not converge (" + reason + ")", t, step,
+      std::move(cells));
+}
+
+Integrator::Integrator(FlowSystem& flow, double theta_tolerance)
+    : impl_(std::make_unique<Impl>(flow, theta_tolerance)) {}
+Integrator::~Integrator() = default;
+
+void Integrator::start(double t, std::span<const double> u) {
+  Impl& s = *impl_;
+  s.t = s.t_before = s.t_start = t;
+  std::copy(u.begin(), u.end(), s.u.begin());
+  s.u_before = s.u;
+  s.u_rate_span = 0.0;
+  s.newton.reset();
+  s.flow.set_time(t);
+  s.flow.set_state(u);
+  double *y = s.data(s.y.get()), *yp = s.data(s.yp.get());
+  std::vector<double> out(s.n);
+  s.flow.net_outflow(out);
+  for (std::size_t i = 0; i < s.n; ++i) {
+    y[i] = s.flow.storage(static_cast<int>(i));
+    yp[i] = -out[i] / s.flow.volume()[i];
+  }
+  for (std::size_t k = 0; k < s.m; ++k) y[s.n + k] = 0.0, yp[s.n + k] = s.flow.patch_outflow()[k];
+  if (s.initialised) {
+    s.earlier = statistics();
+    s.check(IDAReInit(s.ida.get(), t, s.y.get(), s.yp.get()), "IDAReInit");
+  } else {
+    s.make_ida();
+  }
+}
+
+double Integrator::step(double stop) {
+  Impl& s = *impl_;
+  s.check(IDASetStopTime(s.ida.get(), stop), "IDASetStopTime");
+  realtype reached = s.t;
+  const int flag = IDASolve(s.ida.get(), stop, &reached, s.y.get(), s.yp.get(), IDA_ONE_STEP);
+  if (flag < 0) s.fail(flag);
+  s.u_before.swap(s.u);
+  std::copy(s.u_trial.begin(), s.u_trial.end(), s.u.begin());
+  s.u_rate_span = reached - s.t;
+  s.t_before = s.t;
+  s.t = reached;
+  return reached;
+}
+
+double Integrator::time() const { return impl_->t; }
+double Integrator::last_step() const { return impl_->t - impl_->t_before; }
+std::span<const double> Integrator::u() const { return impl_->u; }
+
+void Integrator::totals_at(double t, std::span<double> volumes, std::span<double> flows) const {
+  Impl& s = *impl_;
+  s.check(IDAGetDky(s.ida.get(), t, 0, s.work.get()), "IDAGetDky");
+  std::copy_n(s.data(s.work.get()) + s.n, s.m, volumes.begin());
+  s.check(IDAGetDky(s.ida.get(), t, 1, s.work.get()), "IDAGetDky");
+  std::copy_n(s.data(s.work.get()) + s.n, s.m, flows.begin());
+}
+
+void Integrator::u_at(double t, std::span<double> u) const {
+  const Impl& s = *impl_;
+  const double w = s.t > s.t_before ? (t - s.t_before) / (s.t - s.t_before) : 1.0;
+  for (std::size_t i = 0; i < s.n; ++i) u[i] = s.u_before[i] + w * (s.u[i] - s.u_before[i]);
+}
+
+IntegratorStatistics Integrator::statistics() const {
+  const Impl& s = *impl_;
+  IntegratorStatistics r = s.earlier;
+  long steps = 0, failures = 0;
+  IDAGetNumSteps(s.ida.get(), &steps);
+  IDAGetNumErrTestFails(s.ida.get(), &failures);
+  r.steps += steps;
+  r.error_test_failures += failures;
+  r.newton_iterations = s.newton.iterations();
+  r.factorisations = s.newton.factorisations();
+  r.convergence_failures = s.newton_failures;
+  return r;
+}
+
+}  // namespace ringwright::solver

@@ -1,0 +1,197 @@
+#include "solver/virtual_test.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+#include "solver/domain.hpp"
+#include "solver/failure.hpp"
+#include "solver/flow/curve_table.hpp"
+#include "solver/flow/flow_system.hpp"
+#include "solver/mesh/ring_mesh.hpp"
+#include "solver/time/integrator.hpp"
+
+namespace ringwright::solver {
+namespace {
+
+enum Patch : std::size_t { kRing, kOutside, kBottom, kSide, kPatches };
+constexpr double kMovedAtEdge = 1e-3;  // of dtheta, at the outer faces of the domain
+constexpr int kMostEnlargements = 4;
+constexpr double kWettedShare = 0.05;  // of dtheta, defines the wetted body
+
+std::vector<Condition> conditions(double pond_head) {
+  std::vector<Condition> c(kPatches);
+  c[kRing] = Condition::constant(Boundary::head, pond_head);
+  c[kOutside].kind = Boundary::seepage;
+  c[kBottom].kind = Boundary::free_drainage;
+  return c;
+}
+
+// One attempt on one domain.
+class Attempt {
+ public:
+  Attempt(const TestSetup& setup, const Resolution& resolution, const Domain& domain,
+          std::shared_ptr<const CurveTable> table)
+      : setup_(setup),
+        mesh_(ring_mesh(setup.ring, domain, resolution)),
+        flow_(mesh_, setup.soil, std::move(table), conditions(setup.pond_head)),
+        integrator_(flow_, resolution.theta_tolerance),
+        u_(static_cast<std::size_t>(flow_.cells()), flow_.table().u_of_head(setup.initial_head)) {
+    run_.statistics.cells = flow_.cells();
+    run_.statistics.domain_radius = domain.radius;
+    run_.statistics.domain_depth = domain.depth;
+    stored_at_start_ = stored();
+  }
+
+  TestRun run(const StepObserver& observer);
+  bool domain_was_large_enough() const;
+
+ private:
+  double stored() {
+    flow_.set_state(u_);
+    double sum = 0.0;
+    for (int i = 0; i < flow_.cells(); ++i)
+      sum += flow_.volume()[static_cast<std::size_t>(i)] * flow_.storage(i);
+    return sum;
+  }
+  double content(double u) const { return flow_.storage_of_u(u); }
+  void sample(double t);
+  void snapshot(double t);
+  void finish();
+
+  const TestSetup& setup_;
+  CellsAndFaces mesh_;
+  FlowSystem flow_;
+  Integrator integrator_;
+  std::vector<double> u_;
+  double stored_at_start_ = 0.0;
+  TestRun run_;
+};
+
+void Attempt::sample(double t) {
+  std::vector<double> volume(kPatches), flow(kPatches);
+  integrator_.totals_at(t, volume, flow);
+  Sample s;
+  s.time = t;
+  s.ring_volume = -volume[kRing];
+  s.ring_flow = -flow[kRing];
+  s.drainage_volume = volume[kBottom];
+  s.seepage_volume = volume[kOutside];
+  integrator_.u_at(t, u_);
+  s.stored_volume = stored() - stored_at_start_;
+  run_.samples.push_back(s);
+}
+
+void Attempt::snapshot(double t) {
+  integrator_.u_at(t, u_);
+  Snapshot s;
+  s.time = t;
+  for (double u : u_) {
+    s.head.push_back(flow_.table().head_of_u(u));
+    s.water_content.push_back(setup_.soil.theta_r + content(u));
+  }
+  run_.snapshots.push_back(std::move(s));
+}
+
+TestRun Attempt::run(const StepObserver& observer) {
+  integrator_.start(0.0, u_);
+  auto next_sample = setup_.times.begin();
+  auto next_snapshot = setup_.snapshots.begin();
+  const double end =
+      setup_.times.empty() ? setup_.duration : std::max(setup_.times.back(), setup_.duration);
+  while (integrator_.time() < end) {
+    const double t = integrator_.step(end);
+    for (; next_sample != setup_.times.end() && *next_sample <= t; ++next_sample)
+      sample(*next_sample);
+    for (; next_snapshot != setup_.snapshots.end() && *next_snapshot <= t; ++next_snapshot)
+      snapshot(*next_snapshot);
+    if (observer && !observer(t)) {
+      run_.interrupted = t < end;
+      break;
+    }
+  }
+  finish();
+  return std::move(run_);
+}
+
+void Attempt::finish() {
+  const auto u = integrator_.u();
+  std::copy(u.begin(), u.end(), u_.begin());
+  std::vector<double> volume(kPatches), flow(kPatches);
+  integrator_.totals_at(integrator_.time(), volume, flow);
+  double out = 0.0, throughput = 0.0;
+  for (double v : volume) out += v, throughput += std::abs(v);
+  RunStatistics& s = run_.statistics;
+  s.balance_error =
+      throughput > 0.0 ? std::abs(stored() - stored_at_start_ + out) / throughput : 0.0;
+  const IntegratorStatistics i = integrator_.statistics();
+  s.steps = i.steps, s.newton_iterations = i.newton_iterations;
+  s.factorisations = i.factorisations, s.convergence_failures = i.convergence_failures;
+  const double first = content(flow_.table().u_of_head(setup_.initial_head));
+  const double limit = first + kWettedShare * (flow_.fillable() - first);
+  for (std::size_t c = 0; c < u_.size(); ++c) {
+    if (content(u_[c]) < limit) continue;
+    const auto& centre = mesh_.drawing.centres[c];
+    run_.wetted.depth = std::max(run_.wetted.depth, -centre[1]);
+    run_.wetted.beyond_wall = std::max(run_.wetted.beyond_wall, centre[0] - setup_.ring.radius);
+  }
+  run_.drawing = mesh_.drawing;
+}
+
+// The ground may drain everywhere, so what counts is not that theta moved at the edge but
+// that it moved differently there: across the last columns and along the bottom.
+bool Attempt::domain_was_large_enough() const {
+  const auto u = integrator_.u();
+  std::size_t columns = 0;
+  while (columns < mesh_.drawing.centres.size() &&
+         mesh_.drawing.centres[columns][1] == mesh_.drawing.centres[0][1])
+    ++columns;
+  const std::size_t rows = u.size() / columns;
+  const double first = content(flow_.table().u_of_head(setup_.initial_head));
+  const double limit = kMovedAtEdge * (flow_.fillable() - first);
+  const std::size_t back = std::min<std::size_t>(3, columns - 1);
+  for (std::size_t j = 0; j < rows; ++j) {
+    const std::size_t last = j * columns + columns - 1;
+    if (std::abs(content(u[last]) - content(u[last - back])) > limit) return false;
+  }
+  const std::size_t bottom = (rows - 1) * columns;
+  return std::abs(content(u[bottom]) - content(u[bottom + columns - 1])) <= limit;
+}
+
+}  // namespace
+
+Resolution Resolution::coarser() const {
+  Resolution r = *this;
+  if (splits > 0) {
+    --r.splits;
+  } else {
+    r.tip_cell *= 2, r.top_cell *= 2, r.growth *= growth;
+  }
+  return r;
+}
+
+Resolution Resolution::finer() const {
+  Resolution r = *this;
+  ++r.splits;
+  return r;
+}
+
+TestRun run_test(const TestSetup& setup, const Resolution& resolution,
+                 std::shared_ptr<const CurveTable> table, const StepObserver& observer) {
+  Domain domain = transient_domain(setup, table->capillary_length());
+  for (int enlargements = 0;; ++enlargements) {
+    Attempt attempt(setup, resolution, domain, table);
+    TestRun run = attempt.run(observer);
+    run.statistics.domain_enlargements = enlargements;
+    if (run.interrupted || enlargements == kMostEnlargements || attempt.domain_was_large_enough())
+      return run;
+    domain.radius *= 1.5;
+    domain.depth *= 1.5;
+  }
+}
+
+TestRun run_test(const TestSetup& setup, const Resolution& resolution,
+                 const StepObserver& observer) {
+  return run_test(setup, resolution, std::make_shared<CurveTable>(setup.soil.curves), observer);
+}
+
+}  // namespace ringwright::solver
