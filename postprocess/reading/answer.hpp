@@ -74,9 +74,10 @@ struct Answer {
   double worst_relative_error = 0.0;   ///< largest over all promised figures [-]
   bool accuracy_met = false;
   int refinements = 0;
-  solver::TestRun run;         ///< the finest run, with fields
-  double balance_error = 0.0;  ///< of that run, over throughput [-]
-  long total_steps = 0;        ///< over all companion runs
+  solver::TestRun run;                           ///< the finest run, with fields
+  double balance_error = 0.0;                    ///< of that run, over throughput [-]
+  long total_steps = 0;                          ///< over all companion runs
+  std::optional<solver::Resolution> resolution;  ///< of the finest run, for provenance
   bool interrupted = false;  ///< stopped by the user; what is there is valid up to the last sample
 };
 
