@@ -8,6 +8,9 @@ set(floors models solver postprocess cases)
 list(TRANSFORM floors PREPEND ringwright_ OUTPUT_VARIABLE floor_targets)
 
 install(TARGETS ringwright)
+install(FILES cases/command/shell/ringwright.1 DESTINATION ${CMAKE_INSTALL_MANDIR}/man1)
+install(FILES cases/command/shell/ringwright.bash RENAME ringwright
+  DESTINATION ${CMAKE_INSTALL_DATADIR}/bash-completion/completions)
 install(TARGETS ${floor_targets} EXPORT ringwright_targets)
 foreach(floor IN LISTS floors)
   install(DIRECTORY ${floor} DESTINATION ${CMAKE_INSTALL_INCLUDEDIR}/ringwright
