@@ -1,16 +1,16 @@
 #!/usr/bin/env python3
 """Points of three exact transient solutions, each evaluated by two routes.
 
-Gardner soil K = Ks exp(alpha h), theta = theta_r + (theta_s - theta_r) exp(alpha h), so that K obeys
-a linear equation.  Written values come from the first route, uncertainties from the difference to
-the second:
+Gardner soil K = Ks exp(alpha h), theta = theta_r + (theta_s - theta_r) exp(alpha h), so that K
+obeys a linear equation.  Written values come from the first route, uncertainties from the
+difference to the second:
 
 linear_column  Philip 1969 (Adv. Hydrosci. 5:215): h = 0 on a deep column at h_i.
                1. Laplace transform on Talbot's contour   2. error functions
-tracy_axisymmetric  Tracy 2006 (Water Resour. Res. 42:W08503) with J0(k1 r) for the sine, k1 = j01/R.
+tracy_axisymmetric  Tracy 2006 (Water Resour. Res. 42:W08503), J0(k1 r) for the sine, k1 = j01/R.
                1. images, each with error functions       2. Fourier series
 srivastava_yeh  Srivastava & Yeh 1991 (Water Resour. Res. 27:753), homogeneous column.
-               1. Laplace transform on Talbot's contour   2. series over the roots of tan(l L) + 2 l = 0
+               1. Laplace transform on Talbot's contour   2. series over roots of tan(l L) + 2 l = 0
 Talbot's contour with the weights of Weideman 2006 (SIAM J. Numer. Anal. 44:2342).
 """
 import json
@@ -241,7 +241,8 @@ def main():
     for t, known in ((0.01, 0.995153), (0.1, 3.520711), (0.5, 9.565811), (2.0, 26.323727)):
         print(f"column intake({t}) {column.intake_by_transform(t):.6f} known {known}")
     for r, z, t, known in ((0.0, 25.0, 0.05, -12.134018), (5.0, 20.0, 10.0, -23.564567)):
-        print(f"tracy h({r},{z},{t}) {tracy.head(tracy.depth_by_images(z, t), r, z):.6f} known {known}")
+        value = tracy.head(tracy.depth_by_images(z, t), r, z)
+        print(f"tracy h({r},{z},{t}) {value:.6f} known {known}")
     print(f"rain K*(9,5) {rain.by_transform(9.0, 5.0):.6f} known 0.831465")
     out = dict(about="points of exact transient solutions in a Gardner soil; see README.md",
                generator="reference_points.py", linear_column=column.table(),

@@ -94,8 +94,8 @@ def main():
                          wooding_error_percent=round(wooding, 3)))
         print(f"alpha a {g:<5} f {value:.9f} coarser {value - coarse:+.1e} Wooding {wooding:+.2f} %"
               + (f"  known {known} {value - known:+.1e}" if known else ""))
-    about = ("steady inflow of a disc at head 0 on a deep dry Gardner soil, Q = Ks a/alpha f(alpha a);"
-             " integral equation of the second kind, see README.md")
+    about = ("steady inflow of a disc at head 0 on a deep dry Gardner soil, "
+             "Q = Ks a/alpha f(alpha a); integral equation of the second kind, see README.md")
     with open(os.path.join(HERE, "reference.json"), "w") as file:
         json.dump(dict(about=about, generator="reference_disc.py", rows=rows), file, indent=1)
         file.write("\n")
