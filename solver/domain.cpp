@@ -6,6 +6,9 @@
 namespace ringwright::solver {
 namespace {
 
+// Far cells are large, so that a generous domain costs less than a second run.
+constexpr double kReach = 5.0;
+
 struct Spread {
   double capillary, gravity;  // [m]
 };
@@ -25,8 +28,8 @@ double wetted_depth_estimate(const TestSetup& setup, double lambda, double t) {
 
 Domain transient_domain(const TestSetup& setup, double lambda) {
   const Spread s = spread(setup, lambda, setup.duration);
-  return {setup.ring.radius + 3.0 * (s.capillary + lambda),
-          setup.ring.insertion + 3.0 * (s.capillary + s.gravity + lambda)};
+  return {setup.ring.radius + kReach * (s.capillary + lambda),
+          setup.ring.insertion + kReach * (s.capillary + s.gravity + lambda)};
 }
 
 Domain steady_domain(const models::SingleRing& ring, double lambda) {

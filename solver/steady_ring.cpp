@@ -9,11 +9,10 @@
 #include "solver/flow/flow_system.hpp"
 #include "solver/flow/steady_newton.hpp"
 #include "solver/mesh/ring_mesh.hpp"
+#include "solver/ring_patches.hpp"
 
 namespace ringwright::solver {
 namespace {
-
-enum Patch : std::size_t { kRing, kOutside, kBottom, kSide, kPatches };
 
 // Start: the steady point source in a Gardner soil (Philip 1968), capped near the ring.
 std::vector<double> first_potentials(const SteadyRing& p, const CellsAndFaces& mesh,
@@ -34,24 +33,22 @@ std::vector<double> first_potentials(const SteadyRing& p, const CellsAndFaces& m
 SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
                        std::shared_ptr<const CurveTable> table, const Domain& domain) {
   const CellsAndFaces mesh = ring_mesh(problem.ring, domain, resolution);
-  std::vector<Condition> conditions(kPatches);
-  conditions[kRing] = Condition::constant(Boundary::head, problem.pond_head);
-  conditions[kOutside].kind = Boundary::seepage;
-  conditions[kBottom].kind = Boundary::free_drainage;
   std::vector<double> Phi = first_potentials(problem, mesh, *table);
-  FlowSystem flow(mesh, problem.soil, std::move(table), std::move(conditions));
+  FlowSystem flow(mesh, problem.soil, std::move(table), ring_conditions(mesh, problem.pond_head));
   const SteadyResult found = solve_steady(flow, Phi);
   if (!found.converged)
     throw SolverFailure(
         "no steady flow found after " + std::to_string(found.iterations) + " Newton iterations",
         0.0, 0.0, {});
   const auto out = flow.patch_outflow();
+  const RingPatches patch = ring_patches(mesh);
   SteadyFlow result;
-  result.ring_flow = -out[kRing];
-  result.seepage_flow = out[kOutside];
+  result.ring_flow = -out[patch.ring];
+  result.seepage_flow = out[patch.outside];
   result.iterations = found.iterations;
   result.cells = flow.cells();
-  result.balance_error = std::abs(out[kRing] + out[kOutside] + out[kBottom]) / result.ring_flow;
+  result.balance_error =
+      std::abs(out[patch.ring] + out[patch.outside] + out[patch.bottom]) / result.ring_flow;
   return result;
 }
 

@@ -8,23 +8,15 @@
 #include "solver/flow/curve_table.hpp"
 #include "solver/flow/flow_system.hpp"
 #include "solver/mesh/ring_mesh.hpp"
+#include "solver/ring_patches.hpp"
 #include "solver/time/integrator.hpp"
 
 namespace ringwright::solver {
 namespace {
 
-enum Patch : std::size_t { kRing, kOutside, kBottom, kSide, kPatches };
 constexpr double kMovedAtEdge = 1e-3;  // of dtheta, at the outer faces of the domain
 constexpr int kMostEnlargements = 4;
 constexpr double kWettedShare = 0.05;  // of dtheta, defines the wetted body
-
-std::vector<Condition> conditions(double pond_head) {
-  std::vector<Condition> c(kPatches);
-  c[kRing] = Condition::constant(Boundary::head, pond_head);
-  c[kOutside].kind = Boundary::seepage;
-  c[kBottom].kind = Boundary::free_drainage;
-  return c;
-}
 
 // One attempt on one domain.
 class Attempt {
@@ -33,7 +25,8 @@ class Attempt {
           std::shared_ptr<const CurveTable> table)
       : setup_(setup),
         mesh_(ring_mesh(setup.ring, domain, resolution)),
-        flow_(mesh_, setup.soil, std::move(table), conditions(setup.pond_head)),
+        flow_(mesh_, setup.soil, std::move(table), ring_conditions(mesh_, setup.pond_head)),
+        patches_(ring_patches(mesh_)),
         integrator_(flow_, resolution.theta_tolerance),
         u_(static_cast<std::size_t>(flow_.cells()), flow_.table().u_of_head(setup.initial_head)) {
     run_.statistics.cells = flow_.cells();
@@ -46,6 +39,8 @@ class Attempt {
   bool domain_was_large_enough() const;
 
  private:
+  std::size_t columns() const;
+  Wetted wetted() const;
   double stored() {
     flow_.set_state(u_);
     double sum = 0.0;
@@ -61,6 +56,7 @@ class Attempt {
   const TestSetup& setup_;
   CellsAndFaces mesh_;
   FlowSystem flow_;
+  RingPatches patches_;
   Integrator integrator_;
   std::vector<double> u_;
   double stored_at_start_ = 0.0;
@@ -68,16 +64,15 @@ class Attempt {
 };
 
 void Attempt::sample(double t) {
-  std::vector<double> volume(kPatches), flow(kPatches);
+  std::vector<double> volume(mesh_.patches.size()), flow(mesh_.patches.size());
   integrator_.totals_at(t, volume, flow);
   Sample s;
   s.time = t;
-  s.ring_volume = -volume[kRing];
-  s.ring_flow = -flow[kRing];
-  s.drainage_volume = volume[kBottom];
-  s.seepage_volume = volume[kOutside];
-  integrator_.u_at(t, u_);
-  s.stored_volume = stored() - stored_at_start_;
+  s.ring_volume = -volume[patches_.ring];
+  s.ring_flow = -flow[patches_.ring];
+  s.drainage_volume = volume[patches_.bottom];
+  s.seepage_volume = volume[patches_.outside];
+  s.stored_volume = integrator_.stored_at(t) - stored_at_start_;
   run_.samples.push_back(s);
 }
 
@@ -116,7 +111,7 @@ TestRun Attempt::run(const StepObserver& observer) {
 void Attempt::finish() {
   const auto u = integrator_.u();
   std::copy(u.begin(), u.end(), u_.begin());
-  std::vector<double> volume(kPatches), flow(kPatches);
+  std::vector<double> volume(mesh_.patches.size()), flow(mesh_.patches.size());
   integrator_.totals_at(integrator_.time(), volume, flow);
   double out = 0.0, throughput = 0.0;
   for (double v : volume) out += v, throughput += std::abs(v);
@@ -126,25 +121,45 @@ void Attempt::finish() {
   const IntegratorStatistics i = integrator_.statistics();
   s.steps = i.steps, s.newton_iterations = i.newton_iterations;
   s.factorisations = i.factorisations, s.convergence_failures = i.convergence_failures;
+  run_.wetted = wetted();
+  run_.drawing = mesh_.drawing;
+}
+
+// Where the wetted body ends along a line of cells, linear between centres.
+Wetted Attempt::wetted() const {
   const double first = content(flow_.table().u_of_head(setup_.initial_head));
   const double limit = first + kWettedShare * (flow_.fillable() - first);
+  const auto& centres = mesh_.drawing.centres;
+  const std::size_t columns = this->columns();
+  const auto end = [&](std::size_t inner, std::size_t outer, int axis) {
+    const double a = content(u_[inner]), b = content(u_[outer]);
+    const auto k = static_cast<std::size_t>(axis);
+    return centres[inner][k] + (a - limit) / (a - b) * (centres[outer][k] - centres[inner][k]);
+  };
+  Wetted w;
   for (std::size_t c = 0; c < u_.size(); ++c) {
     if (content(u_[c]) < limit) continue;
-    const auto& centre = mesh_.drawing.centres[c];
-    run_.wetted.depth = std::max(run_.wetted.depth, -centre[1]);
-    run_.wetted.beyond_wall = std::max(run_.wetted.beyond_wall, centre[0] - setup_.ring.radius);
+    const std::size_t below = c + columns, right = c + 1;
+    if (below < u_.size() && content(u_[below]) < limit)
+      w.depth = std::max(w.depth, -end(c, below, 1));
+    if (right % columns != 0 && content(u_[right]) < limit)
+      w.beyond_wall = std::max(w.beyond_wall, end(c, right, 0) - setup_.ring.radius);
   }
-  run_.drawing = mesh_.drawing;
+  return w;
+}
+
+std::size_t Attempt::columns() const {
+  const auto& centres = mesh_.drawing.centres;
+  std::size_t n = 0;
+  while (n < centres.size() && centres[n][1] == centres[0][1]) ++n;
+  return n;
 }
 
 // The ground may drain everywhere, so what counts is not that theta moved at the edge but
 // that it moved differently there: across the last columns and along the bottom.
 bool Attempt::domain_was_large_enough() const {
   const auto u = integrator_.u();
-  std::size_t columns = 0;
-  while (columns < mesh_.drawing.centres.size() &&
-         mesh_.drawing.centres[columns][1] == mesh_.drawing.centres[0][1])
-    ++columns;
+  const std::size_t columns = this->columns();
   const std::size_t rows = u.size() / columns;
   const double first = content(flow_.table().u_of_head(setup_.initial_head));
   const double limit = kMovedAtEdge * (flow_.fillable() - first);
@@ -160,18 +175,20 @@ bool Attempt::domain_was_large_enough() const {
 }  // namespace
 
 Resolution Resolution::coarser() const {
-  Resolution r = *this;
   if (splits > 0) {
+    Resolution r = *this;
     --r.splits;
-  } else {
-    r.tip_cell *= 2, r.top_cell *= 2, r.growth *= growth;
+    return r;
   }
-  return r;
+  return scaled(2.0);
 }
 
-Resolution Resolution::finer() const {
+Resolution Resolution::scaled(double share) const {
   Resolution r = *this;
-  ++r.splits;
+  r.tip_cell *= share;
+  r.top_cell *= share;
+  r.growth = std::pow(growth, share);
+  r.growth_inside = std::pow(growth_inside, share);
   return r;
 }
 

@@ -96,10 +96,10 @@ SteadyResult SteadyNewton::run() {
     result.converged = damping == 0.0 && result.largest_defect < kLargestDefect &&
                        move(1.0) < kLargestChange * top;
     if (result.converged) break;
-    double change = 0.0, next = 0.0, share = 1.0;
+    double next = 0.0, share = 1.0;
     bool better = false;
     for (int halving = 0; halving < 4 && !better; ++halving, share *= 0.5) {
-      change = move(share);
+      move(share);
       next = defect(trial_);
       better = next < (1.0 - 1e-4 * share) * now || next < 1e-12 * inflow_;
     }

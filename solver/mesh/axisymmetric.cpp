@@ -139,16 +139,19 @@ void correct_tip(Section& s, const Wall& w) {
 }
 
 void correct_pond_edge(Section& s, const Wall& w) {
-  const int i = edge_index(s.x, w.radius);
-  // real axis inwards along the pond, imaginary axis down
-  const auto at = [&](double x, double z) { return TipPoint(w.radius - x, -z); };
+  const int outer = edge_index(s.x, w.radius);
+  const int wet = w.pond_inside ? outer - 1 : outer, dry = w.pond_inside ? outer : outer - 1;
+  // real axis along the pond, imaginary axis down
+  const auto at = [&](double x, double z) {
+    return TipPoint(w.pond_inside ? w.radius - x : x - w.radius, -z);
+  };
   const auto centre = [&](int k) { return at(s.xc(k), s.zc(0)); };
-  face_between(s.mesh, s.cell(i - 1, 0), s.cell(i, 0)).transmissibility *=
-      tip_factor(0.0, at(w.radius, s.z[1]), centre(i - 1), centre(i));
+  face_between(s.mesh, s.cell(outer - 1, 0), s.cell(outer, 0)).transmissibility *=
+      tip_factor(0.0, at(w.radius, s.z[1]), centre(wet), centre(dry));
+  const double far_end = w.pond_inside ? s.x[wet] : s.x[wet + 1];
   for (BoundaryFace& b : s.mesh.boundary)
-    if (b.cell == s.cell(i - 1, 0) && b.normal_down < 0)
-      b.transmissibility *=
-          tip_factor(0.0, at(s.x[i - 1], 0.0), at(s.xc(i - 1), 0.0), centre(i - 1));
+    if (b.cell == s.cell(wet, 0) && b.normal_down < 0)
+      b.transmissibility *= tip_factor(0.0, at(far_end, 0.0), at(s.xc(wet), 0.0), centre(wet));
 }
 
 }  // namespace

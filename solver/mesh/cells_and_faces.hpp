@@ -53,4 +53,7 @@ struct CellsAndFaces {
   int cells() const { return static_cast<int>(volume.size()); }
 };
 
+/// The same body with gravity off.
+CellsAndFaces without_gravity(CellsAndFaces mesh);
+
 }  // namespace ringwright::solver

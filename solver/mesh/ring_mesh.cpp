@@ -31,16 +31,24 @@ CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
                         const Resolution& resolution) {
   const double a = ring.radius, d = ring.insertion;
   const double tip = resolution.tip_cell, growth = resolution.growth;
-  std::vector<double> inwards = graded_one_end(a, 0.0, tip, growth);
-  std::reverse(inwards.begin(), inwards.end());
-  inwards.front() = 0.0;
-  std::vector<double> radii = inwards, elevations;
-  append(radii, graded_one_end(a, domain.radius, tip, growth));
-  if (d > 0.0) append(elevations, graded_both_ends(0.0, -d, resolution.top_cell, tip, growth));
-  append(elevations,
-         graded_one_end(-d, -domain.depth, d > 0.0 ? tip : resolution.top_cell, growth));
+  const bool on_surface = d <= 0.0;
+  std::vector<double> radii = graded_one_end(a, 0.0, tip, growth), elevations;
+  std::reverse(radii.begin(), radii.end());
+  radii.front() = 0.0;
+  if (on_surface) append(radii, graded_both_ends(a, a + ring.wall, tip, tip, growth));
+  append(radii, graded_one_end(radii.back(), domain.radius, tip, growth));
+  if (!on_surface)
+    append(elevations,
+           graded_both_ends(0.0, -d, resolution.top_cell, tip, resolution.growth_inside));
+  append(elevations, graded_one_end(-d, -domain.depth, tip, growth));
+  std::vector<Wall> walls{{a, d, true}};
+  std::vector<std::string> surface{"ring", "outside"};
+  if (on_surface) {
+    walls.push_back({a + ring.wall, 0.0, false});
+    surface = {"ring", "wall", "outside"};
+  }
   return axisymmetric_mesh(split(radii, resolution.splits), split(elevations, resolution.splits),
-                           {{a, d}}, {"ring", "outside"});
+                           walls, surface);
 }
 
 }  // namespace ringwright::solver

@@ -8,7 +8,8 @@
 
 namespace ringwright::solver {
 
-/// Patches: "ring", "outside", "bottom", "side".
+/// Patches: "ring", "outside", "bottom", "side", and "wall", the strip under a ring that stands
+/// on the surface.
 CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
                         const Resolution& resolution);
 

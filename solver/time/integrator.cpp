@@ -15,7 +15,7 @@ namespace {
 
 // Newton's tolerances as parts of the error allowed per step. The defect of the storage is
 // what the water balance is made of, hence the small share.
-constexpr double kStorageShare = 0.002;
+constexpr double kStorageShare = 0.0005;
 constexpr double kUnknownTolerance = 2e-5;  // [m]
 constexpr double kNoWeight = 1e-30;         // totals do not take part in the error test
 constexpr int kMaxOrder = 3;
@@ -261,6 +261,15 @@ void Integrator::totals_at(double t, std::span<double> volumes, std::span<double
   std::copy_n(s.data(s.work.get()) + s.n, s.m, volumes.begin());
   s.check(IDAGetDky(s.ida.get(), t, 1, s.work.get()), "IDAGetDky");
   std::copy_n(s.data(s.work.get()) + s.n, s.m, flows.begin());
+}
+
+double Integrator::stored_at(double t) const {
+  Impl& s = *impl_;
+  s.check(IDAGetDky(s.ida.get(), t, 0, s.work.get()), "IDAGetDky");
+  const double* W = s.data(s.work.get());
+  double sum = 0.0;
+  for (std::size_t i = 0; i < s.n; ++i) sum += s.flow.volume()[i] * W[i];
+  return sum;
 }
 
 void Integrator::u_at(double t, std::span<double> u) const {

@@ -44,6 +44,8 @@ class Integrator {
   std::span<const double> u() const;
   /// Cumulative outflow [m3] and outflow [m3/s] of each patch at t within the last step.
   void totals_at(double t, std::span<double> volumes, std::span<double> flows) const;
+  /// Water stored in all cells at t within the last step [m3].
+  double stored_at(double t) const;
   /// Unknowns at t within the last step, linear between its ends.
   void u_at(double t, std::span<double> u) const;
   IntegratorStatistics statistics() const;

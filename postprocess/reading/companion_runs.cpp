@@ -1,0 +1,82 @@
+#include "postprocess/reading/companion_runs.hpp"
+
+#include <algorithm>
+#include <cmath>
+#include <future>
+#include <stdexcept>
+
+namespace ringwright::postprocess {
+namespace {
+
+// What no companion sees: table, domain, Newton's tolerance. Measured below this.
+constexpr double kFloor = 5e-4;
+constexpr double kLooser = 10.0;
+
+Figure combine(double fine, double coarse, double loose, double scale) {
+  return {fine, std::abs(fine - coarse) + std::abs(coarse - loose) + kFloor * std::abs(scale)};
+}
+
+}  // namespace
+
+double volume_at(const solver::TestRun& run, double t) {
+  if (t == 0.0) return 0.0;
+  const auto it = std::lower_bound(run.samples.begin(), run.samples.end(), t * (1 - 1e-12),
+                                   [](const solver::Sample& s, double x) { return s.time < x; });
+  if (it == run.samples.end() || it->time > t * (1 + 1e-12))
+    throw std::out_of_range("no sample at this time");
+  return it->ring_volume;
+}
+
+Figure CompanionRuns::figure(const std::function<double(const solver::TestRun&)>& f) const {
+  const double value = f(fine);
+  return combine(value, f(coarse), f(loose), value);
+}
+
+Figure CompanionRuns::soil_volume(double t) const {
+  return figure([t](const solver::TestRun& r) { return volume_at(r, t); });
+}
+
+Figure CompanionRuns::mean_flow(double from, double to) const {
+  return figure([from, to](const solver::TestRun& r) {
+    return (volume_at(r, to) - volume_at(r, from)) / (to - from);
+  });
+}
+
+Figure CompanionRuns::steady_flow() const {
+  return combine(steady_fine.ring_flow, steady_coarse.ring_flow, steady_coarse.ring_flow,
+                 steady_fine.ring_flow);
+}
+
+Figure CompanionRuns::above_steady(double from, double to) const {
+  const auto excess = [&](const solver::TestRun& r, double steady) {
+    return (volume_at(r, to) - volume_at(r, from)) / (to - from) / steady - 1.0;
+  };
+  return combine(excess(fine, steady_fine.ring_flow), excess(coarse, steady_coarse.ring_flow),
+                 excess(loose, steady_coarse.ring_flow), 1.0);
+}
+
+CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
+                             std::shared_ptr<const solver::CurveTable> table, int threads,
+                             const solver::StepObserver& observer) {
+  const auto policy = threads > 1 ? std::launch::async : std::launch::deferred;
+  const solver::Resolution coarser = resolution.coarser();
+  solver::Resolution looser = coarser;
+  looser.theta_tolerance *= kLooser;
+  solver::TestSetup plain = setup;
+  plain.snapshots.clear();
+  const solver::SteadyRing steady{setup.soil, setup.ring, setup.pond_head};
+
+  CompanionRuns runs;
+  auto others = std::async(policy, [&] {
+    runs.coarse = solver::run_test(plain, coarser, table);
+    runs.loose = solver::run_test(plain, looser, table);
+    runs.steady_fine = solver::steady_flow(steady, resolution, table);
+    runs.steady_coarse = solver::steady_flow(steady, coarser, table);
+  });
+  runs.fine = solver::run_test(setup, resolution, table, observer);
+  if (runs.fine.interrupted && policy == std::launch::deferred) return runs;
+  others.get();
+  return runs;
+}
+
+}  // namespace ringwright::postprocess

@@ -1,0 +1,47 @@
+#pragma once
+/// One question run three times, so that every figure knows its own numerical error.
+///
+///   fine    the mesh and time tolerance chosen
+///   coarse  cells twice as wide and high
+///   loose   the coarse mesh with a ten times looser time tolerance
+///
+/// The error of a figure f is |f_fine - f_coarse| + |f_coarse - f_loose| + a floor: the full
+/// difference, not divided by a Richardson factor, since convergence is not monotone on graded
+/// meshes. It overestimates, and is meant to. The steady flow has its own pair.
+
+#include <functional>
+#include <memory>
+
+#include "postprocess/reading/answer.hpp"
+#include "solver/flow/curve_table.hpp"
+#include "solver/steady_ring.hpp"
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::postprocess {
+
+struct CompanionRuns {
+  solver::TestRun fine, coarse, loose;
+  solver::SteadyFlow steady_fine, steady_coarse;
+
+  /// A figure made from any of the runs by the same function. @param f takes a TestRun
+  Figure figure(const std::function<double(const solver::TestRun&)>& f) const;
+  /// Volume into the soil at a sampled time t [m3].
+  Figure soil_volume(double t) const;
+  /// Mean flow between two sampled times [m3/s].
+  Figure mean_flow(double from, double to) const;
+  Figure steady_flow() const;  ///< [m3/s]
+  /// Mean flow between two sampled times over the steady flow, minus 1 [-].
+  Figure above_steady(double from, double to) const;
+};
+
+/// Cumulative volume [m3] at a time that was sampled; 0 at time 0.
+/// @throws std::out_of_range for a time that was not
+double volume_at(const solver::TestRun& run, double t);
+
+/// Runs all of them; with more than one thread side by side, with the same result.
+/// The observer sees the fine run; when it stops it, only `fine` is filled in.
+CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
+                             std::shared_ptr<const solver::CurveTable> table, int threads,
+                             const solver::StepObserver& observer);
+
+}  // namespace ringwright::postprocess

@@ -1,0 +1,106 @@
+#include "postprocess/reading/ladder.hpp"
+
+#include <algorithm>
+#include <cmath>
+#include <numbers>
+
+#include "models/estimators/reynolds_elrick_single_head.hpp"
+#include "postprocess/reading/test_times.hpp"
+
+namespace ringwright::postprocess {
+namespace {
+
+constexpr std::size_t kRows = 5;       // besides the stop and the longest time
+constexpr double kVolumesFrom = 0.05;  // of the stop
+constexpr double kRatesFrom = 0.25;
+
+Figure times(const Figure& f, double factor) {
+  return {f.value * factor, f.error * std::abs(factor)};
+}
+
+// Both formulas are linear in the rate: the factors are per unit of rate.
+struct PerRate {
+  double rate_as_kfs, one_head, one_head_own_lambda;
+};
+
+PerRate reads_per_rate(const Question& q, double own_lambda) {
+  const double a = q.setup.ring.radius, d = q.setup.ring.insertion, H = q.setup.pond_head;
+  const double area = std::numbers::pi * a * a, Ks = q.setup.soil.Ks;
+  const auto kfs = [&](double alpha_star) {
+    return models::reynolds_elrick_single_head(area, {a, d}, H, alpha_star);
+  };
+  return {1.0 / Ks, kfs(q.assumed_alpha_star) / Ks, kfs(1.0 / own_lambda) / Ks};
+}
+
+ReadsX reads(const Figure& rate, const PerRate& per) {
+  return {times(rate, per.rate_as_kfs), times(rate, per.one_head),
+          times(rate, per.one_head_own_lambda)};
+}
+
+// Splits a figure's error again into mesh and time, for the choice of what to refine.
+class WorstOf {
+ public:
+  explicit WorstOf(const CompanionRuns& runs) : runs_(runs) {}
+
+  template <class F>
+  void promise(const Figure& figure, const F& f) {
+    const double scale = std::abs(f(runs_.fine));
+    worst_.relative_error = std::max(worst_.relative_error, figure.error / scale);
+    worst_.mesh_part =
+        std::max(worst_.mesh_part, std::abs(f(runs_.fine) - f(runs_.coarse)) / scale);
+    worst_.time_part =
+        std::max(worst_.time_part, std::abs(f(runs_.coarse) - f(runs_.loose)) / scale);
+  }
+  void promise(const Figure& figure, double mesh_part) {
+    worst_.relative_error = std::max(worst_.relative_error, figure.relative_error());
+    worst_.mesh_part = std::max(worst_.mesh_part, mesh_part);
+  }
+  const WorstFigure& worst() const { return worst_; }
+
+ private:
+  const CompanionRuns& runs_;
+  WorstFigure worst_;
+};
+
+}  // namespace
+
+double own_capillary_length(const solver::CurveTable& table, double h) {
+  const solver::CurvePoint wet = table.at(table.u_of_head(0.0)), dry = table.at(table.u_of_head(h));
+  return (wet.Phi - dry.Phi) / (1.0 - dry.K);
+}
+
+Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
+  const double area = std::numbers::pi * q.setup.ring.radius * q.setup.ring.radius;
+  const solver::CurveTable table(q.setup.soil.curves);
+  const PerRate per = reads_per_rate(q, own_capillary_length(table, q.setup.initial_head));
+  const double filling = area * q.setup.pond_head;
+  WorstOf worst(runs);
+  Ladder ladder;
+  for (double t : ladder_times(q.reading_interval, stop, q.setup.duration, kRows)) {
+    const double from = std::max(0.0, t - q.reading_interval);
+    const auto flow = [&](const solver::TestRun& r) {
+      return (volume_at(r, t) - (from > 1e-9 * t ? volume_at(r, from) : 0.0)) / (t - from);
+    };
+    const auto volume = [&](const solver::TestRun& r) { return volume_at(r, t); };
+    LadderRow row;
+    row.time = t;
+    row.rate = times(runs.figure(flow), 1.0 / area);
+    row.soil_volume = runs.figure(volume);
+    row.supply_volume = {row.soil_volume.value + filling, row.soil_volume.error};
+    row.reads = reads(row.rate, per);
+    row.above_steady = runs.above_steady(from > 1e-9 * t ? from : 0.0, t);
+    row.stops_here = std::abs(t - stop) <= 1e-9 * stop;
+    if (t >= kVolumesFrom * stop) worst.promise(row.soil_volume, volume);
+    if (t >= kRatesFrom * stop) worst.promise(runs.figure(flow), flow);
+    ladder.rows.push_back(std::move(row));
+  }
+  const Figure steady = runs.steady_flow();
+  worst.promise(steady,
+                std::abs(runs.steady_fine.ring_flow - runs.steady_coarse.ring_flow) / steady.value);
+  ladder.steady_rate = times(steady, 1.0 / area);
+  ladder.steady_reads = reads(ladder.steady_rate, per);
+  ladder.worst = worst.worst();
+  return ladder;
+}
+
+}  // namespace ringwright::postprocess

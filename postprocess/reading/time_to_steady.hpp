@@ -1,0 +1,16 @@
+#pragma once
+#include <memory>
+
+#include "postprocess/reading/answer.hpp"
+#include "solver/flow/curve_table.hpp"
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::postprocess {
+
+/// The last time at which the flow is more than 5 % from the steady flow, from above or below,
+/// found by running on in a domain of its own for up to 1000 h.
+/// @param steady_flow of the same mesh [m3/s] @param resolution of the run on
+TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolution& resolution,
+                            std::shared_ptr<const solver::CurveTable> table, double steady_flow);
+
+}  // namespace ringwright::postprocess

@@ -1,0 +1,22 @@
+#pragma once
+/// From the accuracy asked for to mesh and time tolerance.
+///
+/// What was measured on steady and transient rings (12 soils, radius 3 to 50 cm):
+///  - the square cells at the foot of the wall bring an error of about
+///    +20 % tip^2 / (a lambda), a the radius, lambda the capillary length;
+///  - the uppermost cells matter early: they must resolve the wetted depth;
+///  - growth matters little once cell centres are geometric (grading.hpp);
+///  - time errors fall away quickly: late volumes hardly notice the tolerance.
+/// The error itself is not taken from these rules: it is estimated from companion runs.
+
+#include "solver/virtual_test.hpp"
+
+namespace ringwright::solver {
+
+/// @param accuracy relative, of every promised figure [-]
+/// @param capillary_length of the soil [m]
+/// @param first_time when the first volume is promised [s]
+Resolution resolution_for(const TestSetup& setup, double accuracy, double capillary_length,
+                          double first_time);
+
+}  // namespace ringwright::solver
