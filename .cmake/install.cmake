@@ -18,12 +18,12 @@ foreach(floor IN LISTS floors)
 endforeach()
 install(EXPORT ringwright_targets NAMESPACE ringwright:: DESTINATION ${package_dir})
 
-configure_package_config_file(cmake/ringwright-config.cmake.in
+configure_package_config_file(.cmake/ringwright-config.cmake.in
   ${CMAKE_CURRENT_BINARY_DIR}/ringwright-config.cmake INSTALL_DESTINATION ${package_dir})
 write_basic_package_version_file(${CMAKE_CURRENT_BINARY_DIR}/ringwright-config-version.cmake
   COMPATIBILITY SameMinorVersion)
 install(FILES
   ${CMAKE_CURRENT_BINARY_DIR}/ringwright-config.cmake
   ${CMAKE_CURRENT_BINARY_DIR}/ringwright-config-version.cmake
-  cmake/FindKLU.cmake cmake/FindUDUNITS2.cmake
+  .cmake/FindKLU.cmake .cmake/FindUDUNITS2.cmake
   DESTINATION ${package_dir})
