@@ -1,0 +1,12 @@
+#pragma once
+#include <nlohmann/json.hpp>
+#include <string>
+
+namespace ringwright::postprocess {
+
+/// JSON as text, indented by two blanks, newline at the end. Numbers have as many digits as bring
+/// back the same bits; numbers that are not finite become null; bytes that are not UTF-8 become
+/// replacement characters.
+std::string json_text(const nlohmann::json& document);
+
+}  // namespace ringwright::postprocess
