@@ -1,0 +1,97 @@
+#include "cases/simulate/headline.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+
+#include "cases/simulate/paragraph.hpp"
+#include "cases/simulate/printed_number.hpp"
+
+namespace ringwright::cases {
+namespace {
+
+using postprocess::Answer;
+using postprocess::LadderRow;
+using postprocess::ReadsX;
+
+std::string stop_clause(const Answer& answer, const LadderRow& stop) {
+  const std::string time = time_text(stop.time);
+  const std::string water = rounded_up(stop.supply_volume.value * 1e3);
+  if (answer.question.stop_readings > 0 && !answer.stop_rule_met) {
+    return fmt::format("The stop rule is not met by {}, the longest you allow; bring {} L.", time,
+                       water);
+  }
+  return fmt::format("Stop at {}, bring {} L.", time, water);
+}
+
+// "14 mm/h at 10 degC (18 at 20 degC)"
+std::string true_kfs(const Case& what, const Answer& answer) {
+  const double Kfs = answer.question.setup.soil.Ks;
+  const double temperature = what.ground.water_temperature;
+  if (temperature == 20.0) return fmt::format("{} mm/h at 20 degC", mm_per_hour(Kfs));
+  return fmt::format("{} mm/h at {:g} degC ({} at 20 degC)", mm_per_hour(Kfs), temperature,
+                     mm_per_hour(Kfs * answer.question.viscosity_ratio));
+}
+
+std::string first_sentences(const Case& what, const Answer& answer, const LadderRow& stop) {
+  return fmt::format(
+      "{} The form will say {} mm/h ({} in/h); the true Kfs is {}. Read as Kfs that rate is {} "
+      "times the true one; by the one-head formula with alpha* {:g} 1/cm, {} times.",
+      stop_clause(answer, stop), mm_per_hour(stop.rate.value), inch_per_hour(stop.rate.value),
+      true_kfs(what, answer), rounded(stop.reads.rate_as_kfs.value),
+      answer.question.assumed_alpha_star / 100.0, rounded(stop.reads.one_head.value));
+}
+
+std::string other_sentence(const Case& what, const SoilVariant& variant, const Answer& answer) {
+  const LadderRow* stop = stop_of(answer);
+  if (stop == nullptr) return fmt::format(" By {}: ended before the stop.", variant.source);
+  const bool missed = answer.question.stop_readings > 0 && !answer.stop_rule_met;
+  return fmt::format(" By {}: {} {}, {} L, {} mm/h ({} in/h), true Kfs {}.", variant.source,
+                     missed ? "rule not met by" : "stop at", time_text(stop->time),
+                     rounded_up(stop->supply_volume.value * 1e3), mm_per_hour(stop->rate.value),
+                     inch_per_hour(stop->rate.value), true_kfs(what, answer));
+}
+
+std::string spread(const AnsweredTest& answered, postprocess::Figure ReadsX::*reading) {
+  double least = 0.0, most = 0.0;
+  for (const Answer& answer : answered.answers) {
+    const LadderRow* stop = stop_of(answer);
+    if (stop == nullptr) continue;
+    const double value = (stop->reads.*reading).value;
+    least = most == 0.0 ? value : std::min(least, value);
+    most = std::max(most, value);
+  }
+  const std::string from = rounded(least), to = rounded(most);
+  return from == to ? from : from + " to " + to;
+}
+
+// What the other readings of the user's words say, and how far they are apart.
+std::string comparison(const Case& what, const AnsweredTest& answered) {
+  const auto& variants = what.ground.variants;
+  std::string text = fmt::format("That is with {}.", variants.front().source);
+  for (std::size_t i = 1; i < answered.answers.size(); ++i) {
+    text += other_sentence(what, variants[i], answered.answers[i]);
+  }
+  if (answered.answers.size() < 2) return text;
+  return text +
+         fmt::format(" Across the {} published tables the rate reads x {}, the formula x {}.",
+                     answered.answers.size() == 2 ? "two" : std::to_string(answered.answers.size()),
+                     spread(answered, &ReadsX::rate_as_kfs), spread(answered, &ReadsX::one_head));
+}
+
+}  // namespace
+
+std::string headline(const Case& what, const AnsweredTest& answered) {
+  const LadderRow* stop = stop_of(answered.answers.front());
+  if (stop == nullptr) {
+    return paragraph(
+        "Ended before the stop of the test: no figures for it. What was computed is below.", "  ",
+        "  ");
+  }
+  std::string text = paragraph(first_sentences(what, answered.answers.front(), *stop), "  ", "  ");
+  if (what.ground.variants.size() > 1)
+    text += "\n" + paragraph(comparison(what, answered), "  ", "  ");
+  return text;
+}
+
+}  // namespace ringwright::cases

@@ -1,0 +1,135 @@
+#include "cases/simulate/screen_foot.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+
+#include "cases/simulate/paragraph.hpp"
+#include "cases/simulate/printed_number.hpp"
+#include "models/soil/van_genuchten.hpp"
+
+namespace ringwright::cases {
+namespace {
+
+using postprocess::Answer;
+using postprocess::LadderRow;
+
+std::string steady_sentence(const Answer& answer) {
+  if (answer.interrupted) return "";
+  const std::string time = about_time(answer.time_to_steady.time);
+  return answer.time_to_steady.beyond
+             ? fmt::format(" Not within 5 % of steady even after {}.", time)
+             : fmt::format(" Within 5 % of steady after {}.", time);
+}
+
+// " with minimum capillary height -2 cm", which fixes much of the capillary length of fine soils.
+std::string height_words(const models::Soil& soil) {
+  const auto* curves = dynamic_cast<const models::VanGenuchten*>(soil.curves.get());
+  if (curves == nullptr) return "";
+  return fmt::format(" with minimum capillary height {:g} cm", 100.0 * curves->entry_head());
+}
+
+// "silt loam by Carsel & Parrish 1988: suction 300 cm, 24 % water, 53 % full; capillary length
+// 11 cm with minimum capillary height -2 cm"
+std::string ground_as_run(const SoilVariant& variant, const Answer& answer) {
+  const models::Soil& soil = answer.question.setup.soil;
+  const double head = answer.question.setup.initial_head;
+  const double content = soil.water_content(head);
+  std::string text = fmt::format("{} by {}: suction {} cm, {:.0f} % water, {:.0f} % full",
+                                 variant.label, variant.source, rounded(-100.0 * head),
+                                 100.0 * content, 100.0 * content / soil.theta_s);
+  if (!(answer.own_capillary_length > 0.0)) return text;
+  return text + fmt::format("; capillary length {}{}", about_cm(answer.own_capillary_length),
+                            height_words(soil));
+}
+
+double worst_error(const AnsweredTest& answered) {
+  double worst = 0.0;
+  for (const Answer& answer : answered.answers) {
+    worst = std::max(worst, answer.worst_relative_error);
+  }
+  return worst;
+}
+
+double worst_balance(const AnsweredTest& answered) {
+  double worst = 0.0;
+  for (const Answer& answer : answered.answers) worst = std::max(worst, answer.balance_error);
+  return worst;
+}
+
+// By what factor the rates at the stop differ between the readings of the soil; 1 for one alone.
+double rate_ratio(const AnsweredTest& answered) {
+  double least = 0.0, most = 0.0;
+  for (const Answer& answer : answered.answers) {
+    const LadderRow* stop = stop_of(answer);
+    if (stop == nullptr || !(stop->rate.value > 0.0)) continue;
+    least = most == 0.0 ? stop->rate.value : std::min(least, stop->rate.value);
+    most = std::max(most, stop->rate.value);
+  }
+  return least > 0.0 ? most / least : 1.0;
+}
+
+std::string numerical_words(const Case& what, const AnsweredTest& answered) {
+  const bool met = std::all_of(answered.answers.begin(), answered.answers.end(),
+                               [](const Answer& answer) { return answer.accuracy_met; });
+  if (answered.answers.back().interrupted) {
+    return "the numerical error of an interrupted run is not known.";
+  }
+  const std::string balance = fmt::format("water balance {:.0e}", worst_balance(answered));
+  const std::string error = percent(worst_error(answered));
+  if (met) return fmt::format("numerical error at most {}, {}.", error, balance);
+  return fmt::format("the accuracy asked for, {}, is NOT MET: numerical error {}, {}.",
+                     given_percent(what.accuracy), error, balance);
+}
+
+}  // namespace
+
+std::string stop_details(const Answer& answer) {
+  const LadderRow* stop = stop_of(answer);
+  if (stop == nullptr) return "";
+  const double area = answer.record.ring_area;
+  return paragraph(
+             fmt::format("Wetted at {}: {} deep, {} outside the wall. Nothing below that has been "
+                         "tested.{}",
+                         time_text(stop->time), about_cm(answer.wetted_depth.value),
+                         about_cm(answer.wetted_beyond_wall.value), steady_sentence(answer)),
+             "  ", "    ") +
+         paragraph(fmt::format("Supply: {} L to fill the ring while the soil draws up to {}; at "
+                               "the stop {}.",
+                               litres(answer.filling_volume), flow(answer.peak_flow),
+                               flow(stop->rate.value * area)),
+                   "  ", "    ");
+}
+
+std::string assumed_block(const Case& what, const AnsweredTest& answered) {
+  std::string text;
+  for (std::size_t i = 0; i < answered.answers.size(); ++i) {
+    text += paragraph(ground_as_run(what.ground.variants[i], answered.answers[i]) + ".",
+                      i == 0 ? "  Ground: " : "    ", "    ");
+  }
+  if (what.assumed.empty()) return text;
+  std::string list;
+  for (const Assumption& assumption : what.assumed) {
+    if (!list.empty()) list += "; ";
+    list += assumption.text;
+  }
+  return text + paragraph("Assumed, change if wrong: " + list + ".", "  ", "    ");
+}
+
+std::string doubt_lines(const Case& what, const AnsweredTest& answered) {
+  std::string soil = "Doubt about soil and site, not in these figures, far exceeds the arithmetic";
+  if (answered.answers.size() > 1) {
+    soil = fmt::format(
+        "Doubt about soil and site far exceeds the arithmetic: the tables alone differ x {} in the "
+        "rate",
+        rounded(rate_ratio(answered)));
+  }
+  return paragraph(fmt::format("{}; {}", soil, numerical_words(what, answered)), "  ", "    ") +
+         paragraph(
+             "Prediction, not a measurement. Cracks, roots, swelling, clogging and leaks "
+             "along the wall are not in it. The local code and the licensed professional "
+             "decide.",
+             "  ", "    ");
+}
+
+}  // namespace ringwright::cases
