@@ -25,7 +25,7 @@ struct Face {
 
 struct BoundaryFace {
   int cell = 0;
-  int patch = 0;                ///< index into MeshOfCells::patches
+  int patch = 0;                ///< index into CellsAndFaces::patches
   double transmissibility = 0;  ///< [m], from the cell centre to the face
   double rise = 0;              ///< elevation of the cell minus elevation of the face [m]
   double area = 0;              ///< [m2]

@@ -2,13 +2,20 @@
 
 #include <algorithm>
 #include <cmath>
+#include <stdexcept>
 
 namespace ringwright::solver {
 namespace {
 
+void check_growth(double growth) {
+  if (!(growth >= 1.0)) throw std::invalid_argument("cells must not shrink away from an end");
+}
+
+// Added term by term: the closed form loses all digits near ratio 1.
 double geometric_sum(double first, double ratio, int count) {
-  return std::abs(ratio - 1.0) < 1e-12 ? first * count
-                                       : first * (std::pow(ratio, count) - 1.0) / (ratio - 1.0);
+  double sum = 0.0;
+  for (int i = 0; i < count; ++i, first *= ratio) sum += first;
+  return sum;
 }
 
 // Ratio at which the two ends together fill the length. The sum grows with the ratio.
@@ -26,6 +33,7 @@ double fitting_ratio(double length, double first, int n_first, double last, int 
 }  // namespace
 
 std::vector<double> graded_one_end(double from, double to, double first, double growth) {
+  check_growth(growth);
   const double length = std::abs(to - from), sign = to > from ? 1.0 : -1.0;
   std::vector<double> edges{from};
   if (length <= 1.5 * first) {
@@ -44,12 +52,20 @@ std::vector<double> graded_one_end(double from, double to, double first, double 
 std::vector<double> graded_both_ends(double from, double to, double first, double last,
                                      double growth) {
   const double length = std::abs(to - from), sign = to > from ? 1.0 : -1.0;
+  check_growth(growth);
   if (first + last >= length) {  // too short for two ends: equal cells no wider than either
     const int n = std::max(1, static_cast<int>(std::ceil(length / std::min(first, last))));
     std::vector<double> equal;
     for (int i = 0; i < n; ++i) equal.push_back(from + (to - from) * i / n);
     equal.push_back(to);
     return equal;
+  }
+  // What two end cells leave open may be a sliver: three smaller cells then, in the proportions
+  // of the ends.
+  const double three = first + last + std::min(first, last);
+  if (length < three - 0.5 * std::min(first, last)) {
+    const double share = length / three;
+    return graded_both_ends(from, to, share * first, share * last, growth);
   }
   int n_first = 1, n_last = 1;
   double size_first = first, size_last = last, sum = first + last;

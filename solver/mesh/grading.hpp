@@ -5,12 +5,16 @@
 
 namespace ringwright::solver {
 
+// Both throw std::invalid_argument for a growth below 1.
+
 /// Edges from `from` to `to` (included) whose first cell is exactly `first` wide and
-/// whose cells grow by a common ratio of at most `growth`.
+/// whose cells grow by a common ratio of at most `growth`. A stretch of at most 1.5 `first` is
+/// one cell.
 std::vector<double> graded_one_end(double from, double to, double first, double growth);
 
 /// Edges from `from` to `to` whose first and last cells are exactly `first` and `last`
 /// wide; sizes grow from both ends by a common ratio of at most `growth` and meet inside.
+/// Between ends too close for that, cells are smaller: equal ones, or three in their proportions.
 std::vector<double> graded_both_ends(double from, double to, double first, double last,
                                      double growth);
 
