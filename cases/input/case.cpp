@@ -1,18 +1,14 @@
-#include <stdexcept>
-
 #include "cases/input/case.hpp"
+
+#include "models/soil/moisture.hpp"
 
 namespace ringwright::cases {
 
 double initial_head(const Moisture& moisture, const models::Soil& soil) {
   if (moisture.suction) return -*moisture.suction;
-  const double content = moisture.water_content ? *moisture.water_content
-                                                : moisture.saturation.value_or(0.0) * soil.theta_s;
-  const double saturation = (content - soil.theta_r) / (soil.theta_s - soil.theta_r);
-  if (!(saturation > 0.0 && saturation < 1.0)) {
-    throw std::invalid_argument("the water content is not between residual and saturation");
-  }
-  return soil.curves->head_at(saturation);
+  if (moisture.water_content)
+    return models::moisture_at_content(soil, *moisture.water_content).head;
+  return models::moisture_at_saturation(soil, moisture.saturation.value_or(1.0)).head;
 }
 
 }  // namespace ringwright::cases

@@ -60,7 +60,7 @@ struct Case {
 };
 
 /// Initial pressure head [m] of a variant under a moisture.
-/// @throws std::invalid_argument for a content not between theta_r and theta_s
+/// @throws std::invalid_argument for a content not above theta_r or above theta_s
 double initial_head(const Moisture& moisture, const models::Soil& soil);
 
 }  // namespace ringwright::cases

@@ -30,17 +30,37 @@ std::string shown(std::string_view line) {
   return result;
 }
 
+// Of longer lines a stretch round the caret is shown [characters].
+constexpr int widest = 120;
+
+// Bytes of the first `characters` of UTF-8 text.
+std::size_t bytes_of(std::string_view line, int characters) {
+  std::size_t i = 0;
+  for (; i < line.size(); ++i) {
+    const bool begins = (static_cast<unsigned char>(line[i]) & 0xC0) != 0x80;
+    if (begins && characters-- == 0) break;
+  }
+  return i;
+}
+
+std::string_view cut(std::string_view line, int first, int count) {
+  const std::size_t begin = bytes_of(line, first);
+  return line.substr(begin, bytes_of(line.substr(begin), count));
+}
+
 std::string excerpt(const Place& place, const std::vector<std::string_view>& lines) {
   std::string result;
   const int last = static_cast<int>(lines.size());
+  const int first = place.column > widest ? place.column - widest / 2 : 0;
   for (int line = std::max(1, place.line - 1); line <= std::min(last, place.line + 1); ++line) {
     const std::string_view text = lines[static_cast<std::size_t>(line - 1)];
     if (line != place.line && text.empty()) continue;
-    result += fmt::format("{:>5} | {}\n", line, shown(text));
+    result += fmt::format("{:>5} | {}\n", line, shown(cut(text, first, widest)));
     if (line != place.line) continue;
+    const int length = std::min(place.length, widest / 2);
     result +=
-        fmt::format("      | {}^{}\n", std::string(static_cast<std::size_t>(place.column - 1), ' '),
-                    std::string(static_cast<std::size_t>(std::max(0, place.length - 1)), '~'));
+        fmt::format("      | {}^{}\n", std::string(std::max(0, place.column - 1 - first), ' '),
+                    std::string(std::max(0, length - 1), '~'));
   }
   return result;
 }

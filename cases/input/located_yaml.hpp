@@ -23,6 +23,7 @@ struct LocatedNode {
   Place place;
   std::string text;  ///< of a scalar
   bool quoted = false;
+  bool refused = false;            ///< reported already: no further word about it
   bool in_braces = false;          ///< inside { } or [ ], where a comma ends a value
   std::vector<LocatedNode> items;  ///< of a list
   std::vector<Entry> entries;      ///< of a map, in the order of the file

@@ -25,8 +25,8 @@ std::optional<double> read_minimum_capillary_height(const SectionReader& ground,
   if (given && smallest<least_n&& * given> - least_height) {
     reading.contradiction(
         ground.value_place(key),
-        fmt::format("{}{} is refused for a soil of n = {:.3g}: its conductivity would fall to a "
-                    "fraction within a hair of saturation",
+        fmt::format("{}{} is refused for a soil of n = {:.3g}: its conductivity falls so "
+                    "steeply at saturation that no mesh resolves it",
                     ground.front_of(key), ground.text(key).value_or(""), smallest),
         ground.key_place(n_key), "n is from here",
         "give -0.1 cm or lower (usual: -2 cm); 0 cm is allowed from n = 1.3");

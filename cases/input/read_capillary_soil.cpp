@@ -2,12 +2,11 @@
 
 #include <fmt/format.h>
 
-#include <cmath>
-#include <memory>
+#include <stdexcept>
 
 #include "cases/input/minimum_capillary_height.hpp"
 #include "cases/input/read_phrases.hpp"
-#include "models/soil/gardner.hpp"
+#include "models/soil/soil_from_capillary_length.hpp"
 
 namespace ringwright::cases {
 namespace {
@@ -46,9 +45,10 @@ std::vector<SoilVariant> read_capillary_soil(const SectionReader& ground, const 
         "say the moisture as dry, moist, wet or a suction");
   }
   if (!alpha || !porosity || !Kfs || !suction) return {};
-  const auto curves = std::make_shared<models::Gardner>(*alpha);
-  const double theta_s = *porosity / -std::expm1(-*alpha * *suction);
-  if (theta_s > 0.95) {
+  try {
+    return {{fmt::format("soil of capillary length {:.3g} cm", 100 / *alpha), "case file",
+             models::soil_from_capillary_length(1 / *alpha, *porosity, *Kfs, -*suction)}};
+  } catch (const std::invalid_argument&) {
     reading.contradiction(
         ground.value_place("fillable porosity"),
         fmt::format("{}more than such a soil can take up from a suction of {:.4g} cm",
@@ -57,8 +57,6 @@ std::vector<SoilVariant> read_capillary_soil(const SectionReader& ground, const 
         "give a smaller fillable porosity, or a drier start");
     return {};
   }
-  return {{fmt::format("soil of capillary length {:.3g} cm", 100 / *alpha), "case file",
-           models::Soil{curves, 0.0, theta_s, *Kfs, 0.0}}};
 }
 
 }  // namespace ringwright::cases

@@ -50,12 +50,15 @@ void read_file(const LocatedNode& root, Case& result, Reading& reading) {
 
 Case read_case(const Source& source) {
   Reading reading;
-  reading.show_paths = source.line_flags.empty();
+  reading.from_flags = !source.line_flags.empty();
   const LocatedNode root = parse_yaml(source.text, reading.problems);
   Case result;
   result.text = source.text;
-  if (reading.problems.empty() || root.kind != LocatedNode::Kind::empty) {
+  if (root.kind != LocatedNode::Kind::empty) {
     read_file(root, result, reading);
+  } else if (reading.problems.empty()) {
+    reading.problem(Place{}, "the file holds no case",
+                    "the command 'new' writes one to start from");
   }
   if (!reading.problems.empty()) throw CaseErrors(std::move(reading.problems), source);
   result.assumed = std::move(reading.assumed);

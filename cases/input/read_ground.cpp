@@ -4,6 +4,7 @@
 
 #include "cases/input/read_phrases.hpp"
 #include "cases/input/read_soil.hpp"
+#include "models/soil/moisture.hpp"
 
 namespace ringwright::cases {
 namespace {
@@ -17,10 +18,10 @@ void read_water(const SectionReader& section, Ground& ground, Reading& reading) 
   }
 }
 
-// The moisture and the key it was given by; the key is empty for the default.
-std::string read_moisture_of(const SectionReader& section,
-                             const std::optional<TextureWords>& texture, Ground& ground,
-                             Reading& reading) {
+// Fills the moisture. @return the key it was given by, empty for the default; none if it is wrong
+std::optional<std::string> read_moisture_of(const SectionReader& section,
+                                            const std::optional<TextureWords>& texture,
+                                            Ground& ground, Reading& reading) {
   const bool in_texture = texture && texture->moisture;
   if (in_texture && section.has("moisture")) {
     reading.contradiction(section.value_place("moisture"),
@@ -34,11 +35,12 @@ std::string read_moisture_of(const SectionReader& section,
   } else if (const auto text = section.text("moisture")) {
     moisture = read_moisture(section, "moisture", *text, reading);
   } else if (!section.has("moisture")) {
-    moisture = Moisture{"moist", 3.0, {}, {}};
+    moisture = Moisture{"moist", models::suction_of_word("moist"), {}, {}};
     key = "";
   }
-  if (moisture) ground.moisture = *moisture;
-  return moisture ? key : "wrong";
+  if (!moisture) return std::nullopt;
+  ground.moisture = *moisture;
+  return key;
 }
 
 // A content or degree of saturation must lie between theta_r and theta_s of every soil meant.
@@ -77,13 +79,12 @@ void check_moisture(const SectionReader& section, const std::string& moisture_ke
 void echo_moisture(const std::string& moisture_key, const SectionReader& section,
                    const Ground& ground, Reading& reading) {
   const Moisture& moisture = ground.moisture;
-  const bool word = moisture.words == "dry" || moisture.words == "moist" || moisture.words == "wet";
-  if (!word) return;
+  if (!models::suction_of_word(moisture.words)) return;
   std::string contents;
   for (const SoilVariant& variant : ground.variants) {
-    const double theta = variant.soil.water_content(initial_head(moisture, variant.soil));
+    const auto state = models::moisture_at_suction(variant.soil, *moisture.suction);
     contents += fmt::format("{}{:.0f} % water, {:.0f} % full", contents.empty() ? "" : "; ",
-                            100 * theta, 100 * theta / variant.soil.theta_s);
+                            100 * state.water_content, 100 * state.degree_of_saturation);
   }
   reading.assume(section.path_of(moisture_key.empty() ? "moisture" : moisture_key),
                  fmt::format("\"{}\" = suction {:g} cm ({})", moisture.words,
@@ -92,8 +93,9 @@ void echo_moisture(const std::string& moisture_key, const SectionReader& section
 
 void read_storage(const SectionReader& section, Ground& ground, Reading& reading) {
   const auto storage = section.quantity("specific storage");
-  if (!section.has("specific storage"))
+  if (!section.has("specific storage")) {
     reading.assume(section.path_of("specific storage"), "specific storage 0 1/m");
+  }
   for (SoilVariant& variant : ground.variants)
     variant.soil.specific_storage = storage.value_or(0.0);
 }
@@ -108,15 +110,15 @@ Ground read_ground(const LocatedNode& node, const Place& where, const Key& gramm
   read_water(section, ground, reading);
   const std::string key = soil_key(section, where, reading);
   const auto texture = read_texture(section);
-  const std::string moisture_key = read_moisture_of(section, texture, ground, reading);
+  const auto moisture_key = read_moisture_of(section, texture, ground, reading);
   ground.variants = read_soil(section, key, texture, ground.moisture.suction, reading);
   read_storage(section, ground, reading);
   if (const auto name = section.text("name")) {
     for (SoilVariant& variant : ground.variants) variant.label = *name;
   }
-  if (moisture_key == "wrong" || ground.variants.empty()) return ground;
-  if (!ground.moisture.suction) check_moisture(section, moisture_key, key, ground, reading);
-  echo_moisture(moisture_key, section, ground, reading);
+  if (!moisture_key || ground.variants.empty()) return ground;
+  if (!ground.moisture.suction) check_moisture(section, *moisture_key, key, ground, reading);
+  echo_moisture(*moisture_key, section, ground, reading);
   return ground;
 }
 

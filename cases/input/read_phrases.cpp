@@ -6,8 +6,9 @@
 #include <string>
 #include <vector>
 
-#include "cases/input/alpha_star_class.hpp"
 #include "cases/input/suggestion.hpp"
+#include "models/soil/alpha_star_class.hpp"
+#include "models/soil/moisture.hpp"
 #include "models/water/viscosity.hpp"
 
 namespace ringwright::cases {
@@ -46,13 +47,9 @@ bool take_front(std::string_view& text, std::string_view word) {
   return true;
 }
 
-std::optional<Moisture> moisture_word(std::string_view text) {
-  // Suctions of the words: common practice, no source.
-  const std::string word = normalised(text);
-  if (word == "dry") return Moisture{word, 30.0, {}, {}};
-  if (word == "moist") return Moisture{word, 3.0, {}, {}};
-  if (word == "wet") return Moisture{word, 0.6, {}, {}};
-  return std::nullopt;
+void refuse_stop(const SectionReader& section, std::string_view text) {
+  section.problem("stop", fmt::format("'{}' is not a stop rule", text),
+                  "write for example: after 6 h, or 3 readings within 5 %, or 8 h");
 }
 
 std::optional<models::StopWhenSteady> read_rule(const SectionReader& section, std::string_view text,
@@ -60,8 +57,7 @@ std::optional<models::StopWhenSteady> read_rule(const SectionReader& section, st
   const auto halves = split(text, " within ");
   const auto words = split(halves[0], " ");
   if (halves.size() != 2 || words.size() != 2 || words[1] != "readings") {
-    section.problem("stop", fmt::format("'{}' is not a stop rule", text),
-                    "write for example: 3 readings within 5 %, or 8 h");
+    refuse_stop(section, text);
     return std::nullopt;
   }
   const auto count =
@@ -82,6 +78,12 @@ std::optional<double> read_conductivity(const SectionReader& section, std::strin
                                         Reading& reading) {
   const auto text = section.text(key);
   if (!text) return std::nullopt;
+  if (text->find(',') != std::string::npos &&
+      !std::isdigit(static_cast<unsigned char>((*text)[text->find(',') + 1]))) {
+    section.problem(key, fmt::format("'{}' says more than is understood here", *text),
+                    "write one value and its temperature, such as 18 mm/h at 20 degC");
+    return std::nullopt;
+  }
   const auto halves = split(*text, " at ");
   const auto value = section.quantity_in(key, halves[0]);
   double temperature = published_temperature;
@@ -94,15 +96,14 @@ std::optional<double> read_conductivity(const SectionReader& section, std::strin
     reading.assume(section.path_of(key), fmt::format("{} at 20 degC", key));
   }
   if (!value) return std::nullopt;
-  return *value * models::water_viscosity(temperature) /
-         models::water_viscosity(published_temperature);
+  return *value * models::viscosity_ratio(temperature);
 }
 
 std::optional<double> read_alpha_star(const SectionReader& section, std::string_view key) {
   const auto text = section.text(key);
   if (!text) return std::nullopt;
   std::vector<std::string> words;
-  for (const AlphaStarClass& candidate : alpha_star_classes()) {
+  for (const models::AlphaStarClass& candidate : models::alpha_star_classes()) {
     if (normalised(*text) == candidate.word) return candidate.alpha_star;
     words.emplace_back(candidate.word);
   }
@@ -115,7 +116,8 @@ std::optional<double> read_alpha_star(const SectionReader& section, std::string_
 
 std::optional<Moisture> read_moisture(const SectionReader& section, std::string_view key,
                                       std::string_view text, Reading& reading) {
-  if (auto moisture = moisture_word(text)) return moisture;
+  const std::string word = normalised(text);
+  if (const auto suction = models::suction_of_word(word)) return Moisture{word, suction, {}, {}};
   Moisture moisture{std::string(text), {}, {}, {}};
   std::string_view value = text;
   if (take_front(value, "suction ")) {
@@ -159,6 +161,10 @@ std::optional<StopWords> read_stop(const SectionReader& section, Reading& readin
   }
   if (alternatives.empty()) return stop;
   take_front(alternatives[0], "after ");
+  if (!alternatives[0].empty() && std::isalpha(static_cast<unsigned char>(alternatives[0][0]))) {
+    refuse_stop(section, *text);
+    return std::nullopt;
+  }
   stop.longest = section.quantity_in("stop", alternatives[0]);
   if (!stop.longest) return std::nullopt;
   return stop;

@@ -87,6 +87,14 @@ void refuse_strays(const SectionReader& ground, const std::string& key, Reading&
   }
 }
 
+// Without a soil to build, the values beside it are still looked at.
+void check_values(const SectionReader& ground, Reading& reading) {
+  ground.quantity("capillary length");
+  ground.quantity("fillable porosity");
+  read_alpha_star(ground, "alpha star");
+  read_conductivity(ground, "Kfs", reading);
+}
+
 }  // namespace
 
 std::optional<TextureWords> read_texture(const SectionReader& ground) {
@@ -102,7 +110,8 @@ std::optional<TextureWords> read_texture(const SectionReader& ground) {
 std::string soil_key(const SectionReader& ground, const Place& where, Reading& reading) {
   std::string found;
   bool several = false;
-  for (const char* key : {"texture", "parameters", "capillary length", "alpha star"}) {
+  const char* const keys[] = {"texture", "parameters", "capillary length", "alpha star"};
+  for (const char* key : keys) {
     if (!ground.has(key)) continue;
     if (found.empty()) {
       found = key;
@@ -116,10 +125,12 @@ std::string soil_key(const SectionReader& ground, const Place& where, Reading& r
         fmt::format("{}the soil is already given by '{}'", ground.front_of(second), first),
         ground.key_place(first), "given here", "keep one of the two");
   }
-  if (found.empty()) {
-    reading.problem(
-        where, "ground: the soil is missing",
-        "give texture, or parameters, or capillary length with fillable porosity and Kfs");
+  const bool misspelt = std::any_of(std::begin(keys), std::end(keys),
+                                    [&](const char* key) { return ground.is_suggested(key); });
+  if (found.empty() && !misspelt) {
+    reading.problem(where, ground.front() + "the soil is missing",
+                    "give texture, or parameters, or capillary length with fillable porosity and "
+                    "Kfs");
   }
   return several ? "" : found;
 }
@@ -127,7 +138,10 @@ std::string soil_key(const SectionReader& ground, const Place& where, Reading& r
 std::vector<SoilVariant> read_soil(const SectionReader& ground, const std::string& key,
                                    const std::optional<TextureWords>& texture,
                                    std::optional<double> suction, Reading& reading) {
-  if (key.empty()) return {};
+  if (key.empty()) {
+    check_values(ground, reading);
+    return {};
+  }
   refuse_strays(ground, key, reading);
   if (key == "parameters") return read_parameters(ground, reading);
   if (key != "texture") return read_capillary_soil(ground, key, suction, reading);

@@ -44,13 +44,15 @@ void check_height(const SectionReader& section, const Test& test, Reading& readi
   if (section.has("insert") && test.ring.insertion >= *height) {
     reading.contradiction(section.value_place("insert"),
                           section.front_of("insert") + "deeper than the ring is high",
-                          section.value_place("height"), "height of the ring");
+                          section.value_place("height"), "height of the ring",
+                          "the height goes from the foot of the wall to its rim");
   } else if (section.has("head") && test.ring.insertion + test.protocol.head > *height) {
     reading.contradiction(
         section.value_place("head"),
         fmt::format("{}the ring stands only {:.3g} cm out of the ground", section.front_of("head"),
                     100 * (*height - test.ring.insertion)),
-        section.value_place("height"), "height of the ring");
+        section.value_place("height"), "height of the ring",
+        "the height goes from the foot of the wall to its rim");
   }
 }
 

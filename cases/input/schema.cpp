@@ -32,7 +32,7 @@ Key case_file_grammar() {
        .meaning = "Numerical accuracy asked of every printed figure; 1 % if not given.",
        .examples = {"1 %"},
        .dimension = Dimension::fraction,
-       .range = Range{0.001, 0.05, "0.1 % to 5 %"}},
+       .range = Range{0.001, 0.05, "0.1 % to 5 % (0.001 to 0.05)"}},
       ground_grammar(),
       tests_grammar(),
   };

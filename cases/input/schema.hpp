@@ -35,6 +35,8 @@ struct Range {
 struct Key {
   std::string name = {};
   ValueKind kind = ValueKind::text;
+  /// Other words people use for it, lower case; not read, but answered with the right one.
+  std::vector<std::string> also_called = {};
   std::string meaning = {};  ///< one sentence
   std::vector<std::string> examples = {};
   Dimension dimension = Dimension::fraction;

@@ -44,9 +44,10 @@ Key parameters_grammar() {
        .kind = ValueKind::number,
        .meaning = "Exponent of the pore connectivity; 0.5 if not given.",
        .examples = {"0.5"},
-       .range = Range{-10.0, 10.0, "-10 to 10"}},
+       .range = Range{-2.0, 10.0, "above -2, up to 10", true}},
       {.name = "entry head",
        .kind = ValueKind::quantity,
+       .also_called = {"h b", "hb", "entry suction"},
        .meaning = "Brooks-Corey: pressure head at which air enters, negative.",
        .examples = {"-20 cm"},
        .dimension = Dimension::head,
@@ -70,6 +71,7 @@ std::vector<Key> soil_keys() {
   return {
       {.name = "texture",
        .kind = ValueKind::phrase,
+       .also_called = {"soil", "class"},
        .meaning = "USDA class of the soil, with a moisture word if wanted: its published averages.",
        .examples = {"silt loam, moist", "sandy loam"}},
       {.name = "published",
@@ -97,6 +99,7 @@ std::vector<Key> soil_keys() {
        .range = Range{0.005, 0.8, "0.5 % to 80 %"}},
       {.name = "Kfs",
        .kind = ValueKind::phrase,
+       .also_called = {"k", "ksat", "conductivity", "ks"},
        .meaning = "Field-saturated conductivity, at 20 degC unless another temperature is named.",
        .examples = {"18 mm/h at 20 degC"},
        .dimension = Dimension::speed,
@@ -111,6 +114,7 @@ Key ground_grammar() {
   section.meaning =
       "The ground. The soil is given in one of three ways: texture; parameters; capillary length "
       "or alpha star with fillable porosity and Kfs.";
+  section.examples = {"{ texture: silt loam }"};
   section.keys = {
       {.name = "name",
        .kind = ValueKind::text,
@@ -118,6 +122,7 @@ Key ground_grammar() {
        .examples = {"upper terrace"}},
       {.name = "water",
        .kind = ValueKind::quantity,
+       .also_called = {"temperature", "water temperature"},
        .meaning = "Temperature of the water in the test; 20 degC if not given.",
        .examples = {"10 degC"},
        .dimension = Dimension::temperature,
@@ -129,12 +134,14 @@ Key ground_grammar() {
        .examples = {"moist", "suction 300 cm", "content 25 %", "60 % full"}},
       {.name = "minimum capillary height",
        .kind = ValueKind::quantity,
+       .also_called = {"h s", "hs"},
        .meaning = "h_s of van Genuchten curves: saturated above it; -2 cm where n < 2, else 0.",
        .examples = {"-2 cm"},
        .dimension = Dimension::head,
        .range = Range{-0.2, 0.0, "-20 cm to 0 cm"}},
       {.name = "specific storage",
        .kind = ValueKind::quantity,
+       .also_called = {"ss", "storage"},
        .meaning = "Storage of saturated soil per height of pressure; 0 if not given.",
        .examples = {"0 1/m"},
        .dimension = Dimension::per_head,

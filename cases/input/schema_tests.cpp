@@ -8,12 +8,14 @@ std::vector<Key> protocol_keys() {
   return {
       {.name = "stop",
        .kind = ValueKind::phrase,
+       .also_called = {"duration", "end", "for", "until"},
        .meaning = "When the crew stops: after a time, or when the last readings agree.",
        .examples = {"3 readings within 5 %, or 8 h", "after 6 h"},
        .dimension = Dimension::time,
-       .range = Range{1.0, 3.6e6, "1 s to 1000 h"}},
+       .range = Range{1.0, 3.6e6, "1 s to 1000 h; a test of no duration yields no reading"}},
       {.name = "read",
        .kind = ValueKind::phrase,
+       .also_called = {"interval", "reading interval", "readings"},
        .meaning = "Reading interval, and how finely is read if it is known.",
        .examples = {"every 10 min", "every 10 min, ruler to 1 mm, head kept to 5 mm"},
        .dimension = Dimension::time,
@@ -32,10 +34,12 @@ std::vector<Key> protocol_keys() {
 Key tests_grammar() {
   Key section{.name = "tests", .kind = ValueKind::section, .required = true};
   section.meaning = "One or more ring tests by names of your own, and what holds for all of them.";
+  section.examples = {"{ one head: { ring: 30 cm, insert: 10 cm, head: 5 cm } }"};
   section.keys = protocol_keys();
   section.named = {
       {.name = "ring",
        .kind = ValueKind::quantity,
+       .also_called = {"diameter", "inner diameter", "inner ring", "radius", "size"},
        .meaning = "Inner diameter of the ring.",
        .examples = {"30 cm"},
        .dimension = Dimension::length,
@@ -43,6 +47,7 @@ Key tests_grammar() {
        .required = true},
       {.name = "insert",
        .kind = ValueKind::quantity,
+       .also_called = {"insertion", "depth", "driven", "driven in"},
        .meaning = "How deep the wall stands in the ground: 0 cm, or 0.5 cm and more.",
        .examples = {"10 cm"},
        .dimension = Dimension::length,
@@ -50,6 +55,7 @@ Key tests_grammar() {
        .required = true},
       {.name = "head",
        .kind = ValueKind::quantity,
+       .also_called = {"ponding", "ponding depth", "water depth", "level"},
        .meaning = "Constant depth of water in the ring.",
        .examples = {"5 cm"},
        .dimension = Dimension::head,

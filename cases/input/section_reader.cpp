@@ -54,12 +54,14 @@ void Reading::assume(std::string key, std::string text) {
 SectionReader::SectionReader(const LocatedNode& node, const std::vector<Key>& keys,
                              std::string path, const Place& where, Reading& reading, bool open)
     : node_(&node), keys_(keys), path_(std::move(path)), where_(where), reading_(reading) {
-  if (node.kind != LocatedNode::Kind::map || node.entries.empty()) {
-    broken_ = true;
+  broken_ = node.refused || node.kind != LocatedNode::Kind::map || node.entries.empty();
+  if (node.refused) return;
+  if (broken_) {
     reading_.problem(node.place,
                      fmt::format("{}: a block of keys is needed, not {}",
                                  path_.empty() ? "case file" : path_, found(node)),
-                     fmt::format("keys: {}", fmt::join(names_of(keys_), ", ")));
+                     fmt::format("keys: {}{}", open ? "a name of yours for each test, and " : "",
+                                 fmt::join(names_of(keys_), ", ")));
     return;
   }
   for (const auto& entry : node.entries) {
@@ -82,6 +84,14 @@ void SectionReader::check_unknown(const LocatedNode::Entry& entry) {
                      "inside { } a comma ends a value: put a value with a comma in quotes");
     return;
   }
+  for (const Key& candidate : keys_) {
+    const auto& others = candidate.also_called;
+    if (std::find(others.begin(), others.end(), normalised(key.text)) == others.end()) continue;
+    suggested_.push_back(candidate.name);
+    reading_.problem(key.place, fmt::format("{}unknown key '{}'", front(), key.text),
+                     fmt::format("it is called '{}' here: {}", candidate.name, candidate.meaning));
+    return;
+  }
   const auto names = names_of(keys_);
   if (const auto near = nearest(key.text, names)) suggested_.push_back(*near);
   reading_.problem(key.place, fmt::format("{}unknown key '{}'", front(), key.text),
@@ -90,20 +100,22 @@ void SectionReader::check_unknown(const LocatedNode::Entry& entry) {
 
 void SectionReader::check_missing() {
   for (const Key& key : keys_) {
-    const bool spoken_of =
-        std::find(suggested_.begin(), suggested_.end(), key.name) != suggested_.end();
-    if (!key.required || entry_of(key.name) || spoken_of) continue;
+    if (!key.required || entry_of(key.name) || is_suggested(key.name)) continue;
     reading_.problem(where_, fmt::format("{}the key '{}' is missing", front(), key.name),
                      example_of(key));
   }
 }
 
+bool SectionReader::is_suggested(std::string_view key) const {
+  return std::find(suggested_.begin(), suggested_.end(), key) != suggested_.end();
+}
+
 std::string SectionReader::front() const {
-  return path_.empty() || !reading_.show_paths ? "" : path_ + ": ";
+  return path_.empty() || reading_.from_flags ? "" : path_ + ": ";
 }
 
 std::string SectionReader::front_of(std::string_view key) const {
-  return reading_.show_paths ? path_of(key) + ": " : "";
+  return reading_.from_flags ? "" : path_of(key) + ": ";
 }
 
 const LocatedNode::Entry* SectionReader::entry_of(std::string_view key) const {
@@ -140,7 +152,7 @@ void SectionReader::problem(std::string_view key, const std::string& message,
 const LocatedNode* SectionReader::scalar_of(std::string_view key) const {
   const Key& grammar = grammar_of(key);
   const LocatedNode* node = value_of(key);
-  if (!node) return nullptr;
+  if (!node || node->refused) return nullptr;
   if (node->kind == LocatedNode::Kind::empty ||
       (node->kind == LocatedNode::Kind::scalar && trimmed(node->text).empty())) {
     problem(key, "has no value", example_of(grammar));
@@ -186,7 +198,7 @@ std::optional<double> SectionReader::quantity(std::string_view key) const {
   if (!node) return std::nullopt;
   const Key& grammar = grammar_of(key);
   const bool plain = grammar.kind == ValueKind::number || grammar.dimension == Dimension::fraction;
-  if (plain && node->quoted && node->text.find('%') == std::string::npos) {
+  if (plain && node->quoted && !reading_.from_flags && node->text.find('%') == std::string::npos) {
     problem(key, fmt::format("a number is needed, not the text '{}'", node->text),
             "leave the quotes out");
     return std::nullopt;

@@ -18,7 +18,7 @@ struct Reading {
   Units units;
   std::vector<Diagnostic> problems;
   std::vector<Assumption> assumed;
-  bool show_paths = true;  ///< off when errors name flags
+  bool from_flags = false;  ///< errors name flags, not paths
 
   void problem(const Place& place, std::string message, std::string hint = "");
   /// Two places that cannot both hold. @param other_note what is at the second place
@@ -63,6 +63,9 @@ class SectionReader {
   std::optional<double> quantity_in(std::string_view key, std::string_view text) const;
   /// Reports `message` at the value of `key`, the key's path before it.
   void problem(std::string_view key, const std::string& message, std::string hint = "") const;
+
+  /// A misspelt key was taken for this one.
+  bool is_suggested(std::string_view key) const;
 
   /// Keys that are not in the grammar, in the order of the file (only of an open section).
   const std::vector<const LocatedNode::Entry*>& named() const { return named_; }

@@ -5,7 +5,11 @@
 namespace ringwright::cases {
 namespace {
 
-constexpr std::size_t longest_text = 1u << 20;
+// Far beyond any case file, and within what the YAML library reads in an instant: brackets
+// nested by the thousand take it minutes.
+constexpr std::size_t longest_text = 1u << 18;
+constexpr std::size_t longest_line = 2000;
+constexpr int deepest_brackets = 16;
 
 // Length of the UTF-8 sequence at the start of `text`, 0 if it is none (overlong forms, which
 // only hide other characters, are caught for two and three bytes by the first byte's value).
@@ -26,6 +30,24 @@ std::size_t sequence_length(std::string_view text) {
 bool starts_comment(std::string_view line, std::size_t i) {
   return line[i] == '#' && (i == 0 || line[i - 1] == ' ' || line[i - 1] == '\t');
 }
+
+// Brackets open after each line; those in quotes are counted too, which does no harm.
+class BracketDepth {
+ public:
+  /// @return the line takes it too deep for the first time
+  bool add(std::string_view line) {
+    const bool was_too_deep = depth_ > deepest_brackets;
+    for (std::size_t i = 0; i < line.size() && !starts_comment(line, i); ++i) {
+      if (line[i] == '[' || line[i] == '{') ++depth_;
+      if (line[i] == ']' || line[i] == '}') --depth_;
+      if (depth_ > deepest_brackets) break;
+    }
+    return depth_ > deepest_brackets && !was_too_deep;
+  }
+
+ private:
+  int depth_ = 0;
+};
 
 // One problem per line is enough.
 void look_at_line(std::string_view line, int number, std::vector<Diagnostic>& problems) {
@@ -70,13 +92,21 @@ int characters_in(std::string_view text, std::size_t bytes) {
 
 void find_text_traps(std::string_view text, std::vector<Diagnostic>& problems) {
   if (text.size() > longest_text) {
-    problems.push_back({Place{}, "the text is longer than 1 MiB: not a case file", "", {}, ""});
+    problems.push_back({Place{}, "the text is longer than 256 KiB: not a case file", "", {}, ""});
     return;
   }
-  int number = 1;
-  while (true) {
+  BracketDepth brackets;
+  for (int number = 1;; ++number) {
     const std::size_t end = text.find('\n');
-    look_at_line(text.substr(0, end), number++, problems);
+    const std::string_view line = text.substr(0, end);
+    look_at_line(line, number, problems);
+    if (line.size() > longest_line || brackets.add(line)) {
+      problems.push_back({Place{number, 1, 1},
+                          "a line too long, or brackets nested too deep, for a case file",
+                          "",
+                          {},
+                          ""});
+    }
     if (end == std::string_view::npos) return;
     text.remove_prefix(end + 1);
   }

@@ -9,7 +9,7 @@
 namespace ringwright::cases {
 
 /// Appends a problem per line with a tab outside a comment, for other control characters, for
-/// bytes that are not UTF-8 and for a text longer than any case file.
+/// bytes that are not UTF-8 and for a text, line or nesting beyond any case file.
 void find_text_traps(std::string_view text, std::vector<Diagnostic>& problems);
 
 /// Number of characters in the first `bytes` bytes of UTF-8 text.

@@ -26,15 +26,16 @@ void replace_all(std::string& text, std::string_view from, std::string_view to) 
   }
 }
 
+// The library rounds its gallon; 231 cubic inches are exact.
 std::string_view alias_of(std::string_view word) {
   constexpr std::array<std::pair<std::string_view, std::string_view>, 31> table{{
-      {"gal", "US_liquid_gallon"},
-      {"gals", "US_liquid_gallon"},
-      {"gallon", "US_liquid_gallon"},
-      {"gallons", "US_liquid_gallon"},
-      {"gpm", "(US_liquid_gallon/min)"},
-      {"gph", "(US_liquid_gallon/hour)"},
-      {"gpd", "(US_liquid_gallon/day)"},
+      {"gal", "(231 inch^3)"},
+      {"gals", "(231 inch^3)"},
+      {"gallon", "(231 inch^3)"},
+      {"gallons", "(231 inch^3)"},
+      {"gpm", "(231 inch^3/min)"},
+      {"gph", "(231 inch^3/hour)"},
+      {"gpd", "(231 inch^3/day)"},
       {"lpm", "(liter/min)"},
       {"litres", "liter"},
       {"litre", "liter"},
@@ -68,8 +69,9 @@ std::string_view alias_of(std::string_view word) {
 
 void refuse_misleading(std::string_view word) {
   if (word == "C" || word == "F") {
-    throw ValueError(fmt::format("'{}' alone is a unit of electricity", word),
-                     fmt::format("a temperature is written in deg{}", word));
+    throw ValueError(fmt::format("{} alone is the {}, not a temperature", word,
+                                 word == "C" ? "coulomb" : "farad"),
+                     fmt::format("write deg{}", word));
   }
   if (word == "pF") {
     throw ValueError("pF is a logarithm, not a unit", "write the suction itself: pF 2.5 is 316 cm");

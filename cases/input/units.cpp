@@ -149,9 +149,10 @@ double Units::read(std::string_view text, Dimension dimension) const {
       return dimension == Dimension::head ? value / water_weight : value * water_weight;
     }
   }
+  const bool minutes = dimension == Dimension::time && number.rest == "m";
   throw ValueError(
       fmt::format("'{}' is {}, not {}", trimmed(text), library_->what_is(unit), kind.name),
-      fmt::format("write it like {}", kind.example));
+      minutes ? "minutes are written min" : fmt::format("write it like {}", kind.example));
 }
 
 }  // namespace ringwright::cases
