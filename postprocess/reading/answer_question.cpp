@@ -193,6 +193,7 @@ Answer Answering::run() {
         time_to_steady(setup_, resolution_.coarser(), table_, runs_.steady_coarse.ring_flow);
   }
   answer_.run = std::move(runs_.fine);
+  answer_.resolution = resolution_;
   answer_.balance_error = answer_.run.statistics.balance_error;
   if (observer_) observer_(1.0);
   return std::move(answer_);

@@ -25,9 +25,10 @@ struct PerRate {
 
 PerRate reads_per_rate(const Question& q, double own_lambda) {
   const double a = q.setup.ring.radius, d = q.setup.ring.insertion, H = q.setup.pond_head;
-  const double area = std::numbers::pi * a * a, Ks = q.setup.soil.Ks;
+  const double Ks = q.setup.soil.Ks;
   const auto kfs = [&](double alpha_star) {
-    return models::reynolds_elrick_single_head(area, {a, d}, H, alpha_star);
+    const models::SteadyRing unit_rate{.rate = 1.0, .head = H, .radius = a, .insertion = d};
+    return models::reynolds_elrick_single_head(unit_rate, alpha_star);
   };
   return {1.0 / Ks, kfs(q.assumed_alpha_star) / Ks, kfs(1.0 / own_lambda) / Ks};
 }
