@@ -15,7 +15,7 @@ using postprocess::ReadsX;
 std::string row(std::string_view mark, std::string_view time, double rate, std::string_view water,
                 const ReadsX& reads, std::string_view above, std::string_view remark) {
   std::string line =
-      fmt::format("  {:1} {:>10} {:>8} {:>8} {:>8}   {:>6} {:>8} {:>9} {:>10}", mark, time,
+      fmt::format("  {:1} {:>10} {:>7} {:>7} {:>7}   {:>6} {:>8} {:>9} {:>8}", mark, time,
                   mm_per_hour(rate), inch_per_hour(rate), water, rounded(reads.rate_as_kfs.value),
                   rounded(reads.one_head.value), rounded(reads.one_head_own_lambda.value), above);
   if (!remark.empty()) line += fmt::format("  {}", remark);
@@ -27,9 +27,12 @@ std::string_view stop_remark(const Answer& answer) {
   return answer.stop_rule_met ? "your rule stops here" : "rule not met; you stop";
 }
 
-std::string_view heading() {
-  return "      stop at    rate then        water   reads x, the true Kfs being 1     above\n"
-         "                 mm/h     in/h        L     rate  formula  formula+    steady\n";
+// The widths are those of row().
+std::string heading() {
+  return fmt::format("  {:1} {:>10} {:>15} {:>7}   {:>25} {:>8}\n", "", "stop at", "rate then   ",
+                     "water", "reads x (true Kfs = 1)", "above") +
+         fmt::format("  {:1} {:>10} {:>7} {:>7} {:>7}   {:>6} {:>8} {:>9} {:>8}\n", "", "", "mm/h",
+                     "in/h", "L", "rate", "formula", "formula+", "steady");
 }
 
 std::string notes(const Answer& answer) {
@@ -44,7 +47,7 @@ std::string notes(const Answer& answer) {
 std::string kfs_row(std::string_view name, double Kfs, double viscosity_ratio, double factor,
                     bool two_temperatures, std::string_view remark = "") {
   std::string line =
-      fmt::format("    {:32} {:>8} {:>8}", name, mm_per_hour(Kfs), inch_per_hour(Kfs));
+      fmt::format("    {:20} {:>8} {:>8}", name, mm_per_hour(Kfs), inch_per_hour(Kfs));
   if (two_temperatures) {
     line += fmt::format("   {:>8} {:>8}", mm_per_hour(Kfs * viscosity_ratio),
                         inch_per_hour(Kfs * viscosity_ratio));
@@ -54,20 +57,22 @@ std::string kfs_row(std::string_view name, double Kfs, double viscosity_ratio, d
   return line + "\n";
 }
 
+// The widths are those of kfs_row().
 std::string kfs_heading(double stop_time, double temperature, bool two_temperatures) {
-  const std::string title = fmt::format("Kfs from the reading at {}", time_text(stop_time));
-  const std::string at_test = fmt::format("at {:g} degC", temperature);
-  if (!two_temperatures) {
-    return fmt::format("  {:34} {:>17}   reads x\n{:45}mm/h     in/h\n", title, at_test, "");
+  std::string above = fmt::format("  {:22} {:>17}", "Kfs read at " + time_text(stop_time),
+                                  fmt::format("at {:g} degC", temperature));
+  std::string below = fmt::format("    {:20} {:>8} {:>8}", "", "mm/h", "in/h");
+  if (two_temperatures) {
+    above += fmt::format("   {:>17}", "at 20 degC");
+    below += fmt::format("   {:>8} {:>8}", "mm/h", "in/h");
   }
-  return fmt::format("  {:34} {:>17}   {:>17}   reads x\n{:41}mm/h     in/h {:>10} {:>8}\n", title,
-                     at_test, "at 20 degC", "", "mm/h", "in/h");
+  return above + "   reads x\n" + below + "\n";
 }
 
 }  // namespace
 
 std::string ladder_table(const Answer& answer) {
-  std::string text(heading());
+  std::string text = heading();
   for (const LadderRow& at : answer.ladder) {
     text += row(at.stops_here ? ">" : "", time_text(at.time), at.rate.value,
                 litres(at.supply_volume.value), at.reads, percent(at.above_steady.value),

@@ -13,7 +13,7 @@ struct Rounding {
 };
 
 Rounding rounding_of(double size) {
-  const int digits = fmt::format("{:.1e}", size).front() == '1' ? 3 : 2;
+  const int digits = fmt::format("{:.2e}", size).front() == '1' ? 3 : 2;
   const std::string text = fmt::format("{:.{}e}", size, digits - 1);
   return {digits, std::stoi(text.substr(text.find('e') + 1))};
 }
