@@ -2,12 +2,15 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 
 namespace ringwright::solver {
 namespace {
 
 constexpr double kWorstContraction = 0.3;  // slower than this: new matrix
 constexpr double kLargestCoefficientChange = 1.67;
+// Stands for what is not a number, which any maximum would lose again.
+constexpr double kBeyondNumbers = std::numeric_limits<double>::infinity();
 
 }  // namespace
 
@@ -28,7 +31,7 @@ double SwitchedNewton::residual(std::span<const double> W, std::span<const doubl
   for (std::size_t i = 0; i < residual_.size(); ++i) {
     residual_[i] += V[i] * (W_rate[i] + c * (flow_.storage(static_cast<int>(i)) - W[i]));
     const double size = std::abs(residual_[i]) / (c * V[i]);
-    if (!(size <= worst)) worst = size;  // a NaN counts as worst
+    if (!(size <= worst)) worst = std::isnan(size) ? kBeyondNumbers : size;
   }
   return worst;
 }
@@ -51,7 +54,8 @@ double SwitchedNewton::update(std::span<double> u) const {
   for (std::size_t i = 0; i < u.size(); ++i) {
     const double old = u[i];
     double next = old - step_[i];
-    largest = std::max(largest, std::abs(step_[i]));
+    const double size = std::abs(step_[i]);
+    if (!(size <= largest)) largest = std::isnan(size) ? kBeyondNumbers : size;
     // Water content stays positive: keep a tenth of the way to the driest state.
     next = std::max(next, driest + 0.1 * (old - driest));
     // The storage slope jumps at saturation: land near the kink when crossing it.
