@@ -10,8 +10,8 @@ namespace {
 
 constexpr int kCells = 8000;
 
-// Cells between the wet end and h_i, even in ln|h|. Index 0 is the wettest edge.
-// Se and Kr are scaled by nothing; w = (Se - Se_i) / (1 - Se_i) runs from 1 to 0.
+// Cells between the wet end and h_i, graded in ln|h|. Index 0 is the wettest edge.
+// w = (Se - Se_i) / (1 - Se_i) runs from 1 to 0.
 struct Profile {
   double wet_head = 0.0;    // where the cells begin [m]; wetter is saturated
   double rise = 0.0;        // 1 - Se_i
@@ -33,15 +33,20 @@ Profile profile(const Curves& curves, double h_i) {
       std::min(curves.entry_head(), 1e-8 * std::max(h_i, std::min(curves.steepest_head(), -1e-3)));
   const double Se_i = curves.saturation(h_i);
   p.rise = 1.0 - Se_i;
-  const double step = std::log(h_i / p.wet_head) / kCells;
+  const double range = std::log(h_i / p.wet_head);
+  // Finer towards h_i, where F vanishes.
+  const auto head = [&](double cells) {
+    const double left = 1.0 - cells / kCells;
+    return p.wet_head * std::exp(range * (1.0 - left * left));
+  };
   p.w.resize(kCells + 1);
   p.Kdh.resize(kCells);
   for (int i = 0; i <= kCells; ++i) {
-    const double h = i == kCells ? h_i : p.wet_head * std::exp(i * step);
+    const double h = i == kCells ? h_i : head(i);
     p.w[i] = i == 0 ? 1.0 : (curves.saturation(h) - Se_i) / p.rise;
     if (i == kCells) break;
-    const double next = p.wet_head * std::exp((i + 1) * step);
-    p.Kdh[i] = curves.relative_conductivity(p.wet_head * std::exp((i + 0.5) * step)) * (h - next);
+    const double next = head(i + 1);
+    p.Kdh[i] = curves.relative_conductivity(head(i + 0.5)) * (h - next);
   }
   return p;
 }

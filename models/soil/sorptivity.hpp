@@ -19,7 +19,7 @@ namespace ringwright::models {
 /// @source Parlange 1975, Soil Sci. 119:158
 double parlange_sorptivity(const Soil& soil, double h_i, double H = 0.0);
 
-/// The exact one, to about 1e-5. With F(theta) the flow at theta over that at the surface,
+/// The exact one, to about 1e-6. With F(theta) the flow at theta over that at the surface,
 /// Boltzmann's transformation gives
 ///   F'' = -2 D / (S^2 F),  F(theta_i) = 0,  F(theta_s) = 1,  F'(theta_s) = 2 Ks (H - h_s) / S^2,
 /// which is integrated twice from the surface and iterated from Parlange's F; S^2 follows from
