@@ -5,9 +5,9 @@
 namespace ringwright::cases {
 namespace {
 
-// Far beyond any case file, and within what the YAML library reads in an instant: brackets
-// nested by the thousand take it minutes.
-constexpr std::size_t longest_text = 1u << 18;
+// Far beyond any case file. Without them the YAML library says no more than "bad file" of a text
+// nested too deep, and work that grows with the square of a line or a map would be felt.
+constexpr std::size_t longest_text = 1u << 16;
 constexpr std::size_t longest_line = 2000;
 constexpr int deepest_brackets = 16;
 
@@ -49,16 +49,16 @@ class BracketDepth {
   int depth_ = 0;
 };
 
-// One problem per line is enough.
+// One problem per line is enough; the place is counted only then, lines may be long.
 void look_at_line(std::string_view line, int number, std::vector<Diagnostic>& problems) {
+  const auto place = [&](std::size_t i) { return Place{number, characters_in(line, i) + 1, 1}; };
   bool comment = false;
   for (std::size_t i = 0; i < line.size();) {
     comment = comment || starts_comment(line, i);
     const std::size_t length = sequence_length(line.substr(i));
-    const Place place{number, characters_in(line, i) + 1, 1};
     const auto byte = static_cast<unsigned char>(line[i]);
     if (length == 0) {
-      problems.push_back({place,
+      problems.push_back({place(i),
                           fmt::format("byte 0x{:02x} is not UTF-8 text", byte),
                           "save the file as UTF-8",
                           {},
@@ -67,13 +67,13 @@ void look_at_line(std::string_view line, int number, std::vector<Diagnostic>& pr
     }
     if (byte == '\t' && !comment) {
       problems.push_back(
-          {place, "a tab; YAML aligns by blanks only", "put blanks in its place", {}, ""});
+          {place(i), "a tab; YAML aligns by blanks only", "put blanks in its place", {}, ""});
       return;
     }
     const bool line_end = byte == '\r' && i + 1 == line.size();
     if ((byte < 0x20 && byte != '\t' && !line_end) || byte == 0x7f) {
       problems.push_back(
-          {place, fmt::format("control character 0x{:02x}", byte), "delete it", {}, ""});
+          {place(i), fmt::format("control character 0x{:02x}", byte), "delete it", {}, ""});
       return;
     }
     i += length;
@@ -92,20 +92,21 @@ int characters_in(std::string_view text, std::size_t bytes) {
 
 void find_text_traps(std::string_view text, std::vector<Diagnostic>& problems) {
   if (text.size() > longest_text) {
-    problems.push_back({Place{}, "the text is longer than 256 KiB: not a case file", "", {}, ""});
+    problems.push_back({Place{}, "the text is longer than 64 KiB: not a case file", "", {}, ""});
     return;
   }
   BracketDepth brackets;
   for (int number = 1;; ++number) {
     const std::size_t end = text.find('\n');
     const std::string_view line = text.substr(0, end);
-    look_at_line(line, number, problems);
     if (line.size() > longest_line || brackets.add(line)) {
       problems.push_back({Place{number, 1, 1},
                           "a line too long, or brackets nested too deep, for a case file",
                           "",
                           {},
                           ""});
+    } else {
+      look_at_line(line, number, problems);
     }
     if (end == std::string_view::npos) return;
     text.remove_prefix(end + 1);

@@ -39,7 +39,7 @@ void check_examples(const std::vector<Key>& keys, const Units& units) {
 }  // namespace
 
 TEST_CASE("the schema beside the code is the one the grammar makes") {
-  // To renew it, write case_file_json_schema() over the file: `ringwright info --schema`.
+  // To renew it, write what case_file_json_schema() returns over the file.
   std::ifstream file(std::string(RINGWRIGHT_SOURCE_DIR) + "/cases/input/ringwright.schema.json");
   std::stringstream text;
   text << file.rdbuf();
