@@ -58,6 +58,9 @@ ExitCode report_failure(const Console& console) {
   } catch (const std::exception& error) {
     console.error(fmt::format("a bug of this program, please report it: {}", error.what()));
     return ExitCode::bug;
+  } catch (...) {
+    console.error("a bug of this program, please report it: an unknown exception");
+    return ExitCode::bug;
   }
 }
 

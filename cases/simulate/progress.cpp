@@ -63,8 +63,8 @@ void Progress::tell(double done) {
   if (style_ == ProgressStyle::none || !(done >= done_)) return;
   done_ = std::min(done, 1.0);
   const double elapsed = clock_() - begin_;
-  const bool last_json = style_ == ProgressStyle::json && done_ >= 1.0;
-  if (elapsed - last_told_ < interval_of(style_) && !last_json) return;
+  const bool always = style_ == ProgressStyle::json && (!told_ || done_ >= 1.0);
+  if (elapsed - last_told_ < interval_of(style_) && !always) return;
   last_told_ = elapsed;
   told_ = true;
   if (style_ == ProgressStyle::bar) draw_bar(elapsed);

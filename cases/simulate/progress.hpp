@@ -25,7 +25,7 @@ std::optional<ProgressStyle> progress_style(std::string_view word);
 /// done to tell.
 std::optional<double> seconds_to_go(double done, double elapsed);
 
-/// Safe to tell from several threads. Short runs stay silent, except in JSON.
+/// Safe to tell from several threads. Short runs stay silent; only JSON tells begin and end always.
 class Progress {
  public:
   /// Seconds since any fixed moment.
