@@ -35,6 +35,8 @@ void put_tolerances(hid_t parent, const Provenance& provenance) {
                {"m", "height of the uppermost cells, before splitting"});
   write_scalar(group.id(), "growth", resolution.growth,
                {"1", "largest ratio of neighbouring cells, before splitting"});
+  write_scalar(group.id(), "growth_inside", resolution.growth_inside,
+               {"1", "the same between surface and foot of the wall"});
   write_scalar(group.id(), "splits", std::int64_t{resolution.splits},
                {"1", "times every cell was split in 2 x 2"});
   write_scalar(group.id(), "theta_tolerance", resolution.theta_tolerance,
