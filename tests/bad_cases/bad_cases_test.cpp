@@ -1,5 +1,5 @@
 /// Every wrong case file here is refused with exactly the message in the .expected file beside
-/// it. The first line of a case names its kind of error. The expected texts are written and
+/// it. The first line of a case names its kind of error. The expected texts were read and
 /// judged by hand: a change of wording is a change of what users read.
 
 #include <algorithm>
