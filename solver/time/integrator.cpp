@@ -3,6 +3,7 @@
 #include <algorithm>
 #include <cmath>
 #include <exception>
+#include <limits>
 #include <string>
 #include <vector>
 
@@ -120,7 +121,11 @@ void Integrator::Impl::make_ida() {
   const auto weights = [](N_Vector, N_Vector w, void* self) {
     const Impl& impl = *static_cast<Impl*>(self);
     double* v = impl.data(w);
-    std::fill_n(v, impl.n, 1.0 / impl.tolerance);
+    // IDA's mean runs over all entries; this makes it one over the cells alone, so that the
+    // number of patches does not change the steps.
+    const double share =
+        std::sqrt(static_cast<double>(impl.n + impl.m) / static_cast<double>(impl.n));
+    std::fill_n(v, impl.n, share / impl.tolerance);
     std::fill_n(v + impl.n, impl.m, kNoWeight);
     return 0;
   };
@@ -194,11 +199,15 @@ void Integrator::Impl::fail(int flag) const {
   IDAGetCurrentStep(ida.get(), &step);
   const auto defects = newton.last_defects();
   std::vector<WorstCell> cells;
-  for (std::size_t i = 0; i < n; ++i)
+  for (std::size_t i = 0; i < n; ++i) {
+    const double size = std::abs(defects[i]) / (flow.volume()[i] * tolerance);
+    // where the iteration left the numbers, the last head that was one
+    const double last = std::isfinite(u_trial[i]) ? u_trial[i] : u[i];
     cells.push_back({static_cast<int>(i),
                      {},
-                     flow.table().head_of_u(u_trial[i]),
-                     std::abs(defects[i]) / (flow.volume()[i] * tolerance)});
+                     flow.table().head_of_u(last),
+                     std::isnan(size) ? std::numeric_limits<double>::infinity() : size});
+  }
   const auto count = static_cast<std::ptrdiff_t>(std::min<std::size_t>(5, n));
   std::partial_sort(cells.begin(), cells.begin() + count, cells.end(),
                     [](const WorstCell& a, const WorstCell& b) { return a.size > b.size; });
@@ -214,6 +223,7 @@ Integrator::~Integrator() = default;
 
 void Integrator::start(double t, std::span<const double> u) {
   Impl& s = *impl_;
+  s.error = nullptr;
   s.t = s.t_before = s.t_start = t;
   std::copy(u.begin(), u.end(), s.u.begin());
   s.u_before = s.u;
