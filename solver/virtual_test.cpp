@@ -49,6 +49,7 @@ class Attempt {
     return sum;
   }
   double content(double u) const { return flow_.storage_of_u(u); }
+  double step(double stop);
   void sample(double t);
   void snapshot(double t);
   void finish();
@@ -87,6 +88,17 @@ void Attempt::snapshot(double t) {
   run_.snapshots.push_back(std::move(s));
 }
 
+// The integrator knows no coordinates: a failure gets them here.
+double Attempt::step(double stop) {
+  try {
+    return integrator_.step(stop);
+  } catch (SolverFailure& failure) {
+    for (WorstCell& c : failure.worst)
+      c.centre = mesh_.drawing.centres[static_cast<std::size_t>(c.cell)];
+    throw;
+  }
+}
+
 TestRun Attempt::run(const StepObserver& observer) {
   integrator_.start(0.0, u_);
   auto next_sample = setup_.times.begin();
@@ -94,7 +106,7 @@ TestRun Attempt::run(const StepObserver& observer) {
   const double end =
       setup_.times.empty() ? setup_.duration : std::max(setup_.times.back(), setup_.duration);
   while (integrator_.time() < end) {
-    const double t = integrator_.step(end);
+    const double t = step(end);
     for (; next_sample != setup_.times.end() && *next_sample <= t; ++next_sample)
       sample(*next_sample);
     for (; next_snapshot != setup_.snapshots.end() && *next_snapshot <= t; ++next_snapshot)
@@ -188,6 +200,7 @@ Resolution Resolution::scaled(double share) const {
   r.tip_cell *= share;
   r.top_cell *= share;
   r.growth = std::pow(growth, share);
+  r.growth_down = std::pow(growth_down, share);
   r.growth_inside = std::pow(growth_inside, share);
   return r;
 }
