@@ -1,5 +1,7 @@
 #include "cases/simulate/paragraph.hpp"
 
+#include <algorithm>
+
 namespace ringwright::cases {
 namespace {
 
@@ -10,17 +12,32 @@ std::size_t width_of(std::string_view text) {
   return width;
 }
 
+bool is_number(std::string_view word) {
+  return !word.empty() && word.find_first_not_of("0123456789.+-") == std::string_view::npos;
+}
+
+// Takes the next word off the text; a number together with the word after it, its unit.
+std::string take_word(std::string_view& text) {
+  const auto take = [&text] {
+    const std::size_t begin = std::min(text.find_first_not_of(' '), text.size());
+    const std::size_t end = std::min(text.find(' ', begin), text.size());
+    const std::string word(text.substr(begin, end - begin));
+    text.remove_prefix(end);
+    return word;
+  };
+  std::string word = take();
+  if (!is_number(word)) return word;
+  const std::string unit = take();
+  return unit.empty() ? word : word + " " + unit;
+}
+
 }  // namespace
 
 std::string paragraph(std::string_view text, std::string_view first, std::string_view rest) {
   std::string result;
   std::string line(first);
   bool empty = true;
-  while (!text.empty()) {
-    const std::size_t end = std::min(text.find(' '), text.size());
-    const std::string_view word = text.substr(0, end);
-    text.remove_prefix(std::min(end + 1, text.size()));
-    if (word.empty()) continue;
+  for (std::string word = take_word(text); !word.empty(); word = take_word(text)) {
     if (!empty && width_of(line) + 1 + width_of(word) > screen_width) {
       result += line + "\n";
       line = rest;
