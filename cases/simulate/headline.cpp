@@ -79,14 +79,20 @@ std::string comparison(const Case& what, const AnsweredTest& answered) {
                      spread(answered, &ReadsX::rate_as_kfs), spread(answered, &ReadsX::one_head));
 }
 
+std::string ended_early(const Answer& answer) {
+  const auto& readings = answer.record.readings;
+  return fmt::format("Ended before the stop of the test: no figures for it. {}",
+                     readings.empty()
+                         ? "There is no reading yet."
+                         : fmt::format("The record goes to {}.", time_text(readings.back().time)));
+}
+
 }  // namespace
 
 std::string headline(const Case& what, const AnsweredTest& answered) {
   const LadderRow* stop = stop_of(answered.answers.front());
   if (stop == nullptr) {
-    return paragraph(
-        "Ended before the stop of the test: no figures for it. What was computed is below.", "  ",
-        "  ");
+    return paragraph(ended_early(answered.answers.front()), "  ", "  ");
   }
   std::string text = paragraph(first_sentences(what, answered.answers.front(), *stop), "  ", "  ");
   if (what.ground.variants.size() > 1)

@@ -72,7 +72,7 @@ double rate_ratio(const AnsweredTest& answered) {
 std::string numerical_words(const Case& what, const AnsweredTest& answered) {
   const bool met = std::all_of(answered.answers.begin(), answered.answers.end(),
                                [](const Answer& answer) { return answer.accuracy_met; });
-  if (answered.answers.back().interrupted) {
+  if (answered.answers.back().interrupted && answered.answers.back().ladder.empty()) {
     return "the numerical error of an interrupted run is not known.";
   }
   const std::string balance = fmt::format("water balance {:.0e}", worst_balance(answered));

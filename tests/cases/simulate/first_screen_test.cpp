@@ -137,8 +137,10 @@ TEST_CASE("an interrupted run has a screen without figures it does not have", "[
   auto& answer = simulation.tests[0].answers[0];
   answer.interrupted = true;
   answer.ladder.clear();
+  answer.record.readings = {{600.0, 600.0, 1e-3, 1e-3, 0.05}};
   const std::string screen = screen_of(simulation);
-  CHECK_THAT(screen, Contains("Ended before the stop of the test"));
+  CHECK_THAT(screen, Contains("Ended before the stop of the test: no figures for it. The record "
+                              "goes to 10 min."));
   CHECK_THAT(screen, Contains("the numerical\n    error of an interrupted run is not known"));
   CHECK_THAT(screen, !Contains("NOT MET") && !Contains("Wetted") && !Contains("stop at "));
 }
