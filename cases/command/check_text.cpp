@@ -82,9 +82,9 @@ std::string assumed_lines(const Case& what) {
 
 double rough_duration(const Case& what) {
   // Measured on one core of a common machine; a finer answer has more cells and more steps.
-  constexpr double seconds_at_one_per_cent = 0.1;
+  constexpr double seconds_at_one_per_cent = 0.2;
   const double runs = static_cast<double>(what.tests.size() * what.ground.variants.size());
-  return runs * seconds_at_one_per_cent * std::pow(0.01 / what.accuracy, 1.3);
+  return runs * seconds_at_one_per_cent * std::pow(0.01 / what.accuracy, 0.6);
 }
 
 std::string check_text(const Case& what) {
