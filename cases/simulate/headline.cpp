@@ -72,6 +72,9 @@ std::string comparison(const Case& what, const AnsweredTest& answered) {
   for (std::size_t i = 1; i < answered.answers.size(); ++i) {
     text += other_sentence(what, variants[i], answered.answers[i]);
   }
+  for (std::size_t i = answered.answers.size(); i < variants.size(); ++i) {
+    text += fmt::format(" By {}: not computed.", variants[i].source);
+  }
   if (answered.answers.size() < 2) return text;
   return text +
          fmt::format(" Across the {} published tables the rate reads x {}, the formula x {}.",

