@@ -7,7 +7,7 @@ namespace ringwright::solver {
 namespace {
 
 // Far cells are large, so that a generous domain costs less than a second run.
-constexpr double kReach = 5.0;
+constexpr double kReach = 4.0;
 
 struct Spread {
   double capillary, gravity;  // [m]

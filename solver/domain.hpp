@@ -15,7 +15,7 @@ struct Domain {
 /// (Green & Ampt 1911 in the form of Philip 1957).
 double wetted_depth_estimate(const TestSetup& setup, double capillary_length, double t);
 
-/// Domain of the transient test: five times what gravity and capillarity can wet, below
+/// Domain of the transient test: four times what gravity and capillarity can wet, below
 /// the wall and (without gravity) beside it.
 Domain transient_domain(const TestSetup& setup, double capillary_length);
 

@@ -30,11 +30,11 @@ struct TestSetup {
 struct Resolution {
   double tip_cell =
       0.0;  ///< edge of the square cells at the foot of the wall, before splitting [m]
-  double top_cell = 0.0;  ///< height of the uppermost cells, before splitting [m]
-  double growth = 1.6;    ///< largest ratio of neighbouring cells, before splitting [-]
-  double growth_inside =
-      1.35;        ///< the same between surface and foot of the wall, where the front starts
-  int splits = 1;  ///< every cell is split in 2 x 2 this many times
+  double top_cell = 0.0;     ///< height of the uppermost cells, before splitting [m]
+  double growth = 1.6;       ///< largest ratio of neighbouring cells outwards, before splitting [-]
+  double growth_down = 1.4;  ///< the same downwards below the foot of the wall
+  double growth_inside = 1.35;    ///< the same between surface and foot, where the front starts
+  int splits = 1;                 ///< every cell is split in 2 x 2 this many times
   double theta_tolerance = 1e-3;  ///< absolute error of water content per time step [-]
 
   /// The same mesh with cells twice as wide and high.

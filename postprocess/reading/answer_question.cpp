@@ -100,7 +100,7 @@ class Answering {
   solver::TestSetup setup_;
   CompanionRuns runs_;
   WorstFigure worst_;
-  solver::Resolution resolution_;
+  solver::Resolution first_resolution_, resolution_;
   Answer answer_;
 };
 
@@ -124,9 +124,9 @@ double Answering::pilot_stop(const solver::Resolution& resolution) {
 
 void Answering::run_until_accurate() {
   const double lambda = table_->capillary_length(), accuracy = question().accuracy;
-  const solver::Resolution first =
+  first_resolution_ =
       solver::resolution_for(setup_, accuracy, lambda, kVolumesFrom * setup_.duration);
-  const double stop = pilot_stop(first.coarser());
+  const double stop = pilot_stop(first_resolution_.coarser());
   resolution_ = solver::resolution_for(setup_, accuracy, lambda, kVolumesFrom * stop);
   for (;; ++answer_.refinements) {
     CompanionRuns next =
@@ -135,6 +135,7 @@ void Answering::run_until_accurate() {
     // An interrupted refinement leaves the complete set before it.
     if (answer_.interrupted && answer_.refinements > 0) return;
     runs_ = std::move(next);
+    runs_.floor = error_floor(accuracy);
     if (answer_.interrupted) return;
     const auto& s = runs_.fine.statistics;
     answer_.total_steps += s.steps + runs_.coarse.statistics.steps + runs_.loose.statistics.steps;
@@ -150,9 +151,9 @@ void Answering::run_until_accurate() {
 void Answering::refine(solver::Resolution& resolution) const {
   const double accuracy = question().accuracy;
   if (worst_.time_part > 0.4 * accuracy) resolution.theta_tolerance *= 0.3;
-  if (worst_.mesh_part > 0.6 * accuracy)
-    resolution = resolution.scaled(
-        std::clamp(0.85 * std::sqrt(0.7 * accuracy / worst_.mesh_part), 0.45, 0.9));
+  if (worst_.mesh_part > 0.5 * accuracy)
+    resolution =
+        resolution.scaled(std::clamp(std::sqrt(0.7 * accuracy / worst_.mesh_part), 0.4, 0.85));
 }
 
 void Answering::read() {
@@ -189,8 +190,7 @@ Answer Answering::run() {
     answer_.wetted_depth = runs_.figure([](const solver::TestRun& r) { return r.wetted.depth; });
     answer_.wetted_beyond_wall =
         runs_.figure([](const solver::TestRun& r) { return r.wetted.beyond_wall; });
-    answer_.time_to_steady =
-        time_to_steady(setup_, resolution_.coarser(), table_, runs_.steady_coarse.ring_flow);
+    answer_.time_to_steady = time_to_steady(setup_, first_resolution_, table_);
   }
   answer_.run = std::move(runs_.fine);
   answer_.resolution = resolution_;

@@ -8,12 +8,11 @@
 namespace ringwright::postprocess {
 namespace {
 
-// What no companion sees: table, domain, Newton's tolerance. Measured below this.
-constexpr double kFloor = 5e-4;
 constexpr double kLooser = 10.0;
 
-Figure combine(double fine, double coarse, double loose, double scale) {
-  return {fine, std::abs(fine - coarse) + std::abs(coarse - loose) + kFloor * std::abs(scale)};
+// @param least smallest error that may be stated
+Figure combine(double fine, double coarse, double loose, double least) {
+  return {fine, std::abs(fine - coarse) + std::abs(coarse - loose) + std::abs(least)};
 }
 
 }  // namespace
@@ -29,7 +28,7 @@ double volume_at(const solver::TestRun& run, double t) {
 
 Figure CompanionRuns::figure(const std::function<double(const solver::TestRun&)>& f) const {
   const double value = f(fine);
-  return combine(value, f(coarse), f(loose), value);
+  return combine(value, f(coarse), f(loose), floor * value);
 }
 
 Figure CompanionRuns::soil_volume(double t) const {
@@ -44,7 +43,7 @@ Figure CompanionRuns::mean_flow(double from, double to) const {
 
 Figure CompanionRuns::steady_flow() const {
   return combine(steady_fine.ring_flow, steady_coarse.ring_flow, steady_coarse.ring_flow,
-                 steady_fine.ring_flow);
+                 floor * steady_fine.ring_flow);
 }
 
 Figure CompanionRuns::above_steady(double from, double to) const {
@@ -52,7 +51,7 @@ Figure CompanionRuns::above_steady(double from, double to) const {
     return (volume_at(r, to) - volume_at(r, from)) / (to - from) / steady - 1.0;
   };
   return combine(excess(fine, steady_fine.ring_flow), excess(coarse, steady_coarse.ring_flow),
-                 excess(loose, steady_coarse.ring_flow), 1.0);
+                 excess(loose, steady_coarse.ring_flow), floor);
 }
 
 CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,

@@ -22,6 +22,7 @@ namespace ringwright::postprocess {
 struct CompanionRuns {
   solver::TestRun fine, coarse, loose;
   solver::SteadyFlow steady_fine, steady_coarse;
+  double floor = 0.0;  ///< least relative error of any figure [-]
 
   /// A figure made from any of the runs by the same function. @param f takes a TestRun
   Figure figure(const std::function<double(const solver::TestRun&)>& f) const;
@@ -43,5 +44,9 @@ double volume_at(const solver::TestRun& run, double t);
 CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
                              std::shared_ptr<const solver::CurveTable> table, int threads,
                              const solver::StepObserver& observer);
+
+/// The floor of the error for an accuracy asked for: two meshes may agree by chance, and the
+/// table, the domain and Newton's tolerance are not seen by the companions.
+inline double error_floor(double accuracy) { return 0.2 * accuracy; }
 
 }  // namespace ringwright::postprocess

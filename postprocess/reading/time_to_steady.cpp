@@ -3,6 +3,8 @@
 #include <algorithm>
 #include <cmath>
 
+#include "solver/steady_ring.hpp"
+
 namespace ringwright::postprocess {
 namespace {
 
@@ -21,7 +23,9 @@ std::vector<double> times_up_to(double end) {
 }  // namespace
 
 TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                            std::shared_ptr<const solver::CurveTable> table, double steady_flow) {
+                            std::shared_ptr<const solver::CurveTable> table) {
+  const double steady_flow =
+      solver::steady_flow({setup.soil, setup.ring, setup.pond_head}, resolution, table).ring_flow;
   // Wu et al. 1999 (SSSAJ 63:788): the approach scales with dtheta lambda / Ks.
   const double dtheta = setup.soil.theta_s - setup.soil.water_content(setup.initial_head);
   const double scale = dtheta * (table->capillary_length() + setup.pond_head) / setup.soil.Ks;

@@ -9,8 +9,8 @@ namespace ringwright::postprocess {
 
 /// The last time at which the flow is more than 5 % from the steady flow, from above or below,
 /// found by running on in a domain of its own for up to 1000 h.
-/// @param steady_flow of the same mesh [m3/s] @param resolution of the run on
+/// @param resolution of the run on and of the steady flow it is held against
 TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                            std::shared_ptr<const solver::CurveTable> table, double steady_flow);
+                            std::shared_ptr<const solver::CurveTable> table);
 
 }  // namespace ringwright::postprocess

@@ -7,7 +7,7 @@
 namespace ringwright::solver {
 namespace {
 
-constexpr double kWorstContraction = 0.3;  // slower than this: new matrix
+constexpr double kWorstContraction = 0.45;  // slower than this: new matrix
 constexpr double kLargestCoefficientChange = 1.67;
 // Stands for what is not a number, which any maximum would lose again.
 constexpr double kBeyondNumbers = std::numeric_limits<double>::infinity();

@@ -40,7 +40,7 @@ CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
   if (!on_surface)
     append(elevations,
            graded_both_ends(0.0, -d, resolution.top_cell, tip, resolution.growth_inside));
-  append(elevations, graded_one_end(-d, -domain.depth, tip, growth));
+  append(elevations, graded_one_end(-d, -domain.depth, tip, resolution.growth_down));
   std::vector<Wall> walls{{a, d, true}};
   std::vector<std::string> surface{"ring", "outside"};
   if (on_surface) {
