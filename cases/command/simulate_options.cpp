@@ -29,7 +29,7 @@ constexpr std::array<FlagOfCase, 17> case_flags{{
     {"--capillary-length", &CaseFlags::capillary_length, "\"8 cm\", instead of --soil"},
     {"--alpha-star", &CaseFlags::alpha_star, "\"0.12 1/cm\", instead of --soil"},
     {"--fillable-porosity", &CaseFlags::fillable_porosity, "\"25 %\", with one of the last two"},
-    {"--Kfs", &CaseFlags::Kfs, "\"18 mm/h at 20 degC\""},
+    {"--kfs", &CaseFlags::Kfs, "\"18 mm/h at 20 degC\""},
     {"--moisture", &CaseFlags::moisture, "\"suction 300 cm\", \"content 25 %\", \"60 % full\""},
     {"--minimum-capillary-height", &CaseFlags::capillary_height, "\"-2 cm\""},
     {"--water", &CaseFlags::water, "Temperature, \"10 degC\""},
