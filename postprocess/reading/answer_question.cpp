@@ -182,7 +182,8 @@ Answer Answering::run() {
   answer_.filling_volume =
       std::numbers::pi * setup_.ring.radius * setup_.ring.radius * setup_.pond_head;
   run_until_accurate();
-  if (runs_.coarse.samples.empty()) {  // interrupted before anything was complete
+  if (answer_.interrupted &&
+      answer_.refinements == 0) {  // interrupted before anything was complete
     answer_.record = record_of(question(), runs_.fine);
   } else {
     answer_.peak_flow = volume_at(runs_.fine, std::min(kPeakInterval, setup_.duration)) /

@@ -1,6 +1,7 @@
 #include "postprocess/reading/companion_runs.hpp"
 
 #include <algorithm>
+#include <atomic>
 #include <cmath>
 #include <future>
 #include <stdexcept>
@@ -66,15 +67,25 @@ CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resol
   const solver::SteadyRing steady{setup.soil, setup.ring, setup.pond_head};
 
   CompanionRuns runs;
+  std::atomic<bool> stop{false};
+  const auto unless_stopped = [&stop](double) { return !stop; };
   auto others = std::async(policy, [&] {
-    runs.coarse = solver::run_test(plain, coarser, table);
-    runs.loose = solver::run_test(plain, looser, table);
+    runs.coarse = solver::run_test(plain, coarser, table, unless_stopped);
+    if (stop) return;
+    runs.loose = solver::run_test(plain, looser, table, unless_stopped);
+    if (stop) return;
     runs.steady_fine = solver::steady_flow(steady, resolution, table);
     runs.steady_coarse = solver::steady_flow(steady, coarser, table);
   });
-  runs.fine = solver::run_test(setup, resolution, table, observer);
-  if (runs.fine.interrupted && policy == std::launch::deferred) return runs;
-  others.get();
+  try {
+    runs.fine = solver::run_test(setup, resolution, table, observer);
+  } catch (...) {
+    stop = true;  // the others refer to this frame: end them before leaving it
+    if (policy == std::launch::async) others.wait();
+    throw;
+  }
+  if (runs.fine.interrupted) stop = true;
+  if (!runs.fine.interrupted || policy == std::launch::async) others.get();
   return runs;
 }
 

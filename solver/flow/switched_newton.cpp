@@ -9,6 +9,7 @@ namespace {
 
 constexpr double kWorstContraction = 0.45;  // slower than this: new matrix
 constexpr double kLargestCoefficientChange = 1.67;
+constexpr double kRoundOff = 1e-14;  // of the storage, in the sum of the defects
 // Stands for what is not a number, which any maximum would lose again.
 constexpr double kBeyondNumbers = std::numeric_limits<double>::infinity();
 
@@ -27,12 +28,16 @@ double SwitchedNewton::residual(std::span<const double> W, std::span<const doubl
   flow_.set_state(u);
   flow_.net_outflow(residual_);
   const auto V = flow_.volume();
-  double worst = 0.0;
+  double worst = 0.0, sum = 0.0, total_volume = 0.0, through = 0.0;
   for (std::size_t i = 0; i < residual_.size(); ++i) {
     residual_[i] += V[i] * (W_rate[i] + c * (flow_.storage(static_cast<int>(i)) - W[i]));
     const double size = std::abs(residual_[i]) / (c * V[i]);
     if (!(size <= worst)) worst = std::isnan(size) ? kBeyondNumbers : size;
+    sum += residual_[i];
+    total_volume += V[i];
   }
+  for (double q : flow_.patch_outflow()) through += std::abs(q);
+  imbalance_ = std::abs(sum) / (tolerances_.balance * through + kRoundOff * c * total_volume);
   return worst;
 }
 
@@ -85,7 +90,8 @@ bool SwitchedNewton::solve(std::span<const double> W, std::span<const double> W_
     defect = residual(W, W_rate, c, u);
     const double remaining =
         k > 0 && contraction < 0.9 ? largest * contraction / (1 - contraction) : largest;
-    if (defect < tolerances_.storage && remaining < tolerances_.unknown) return true;
+    if (defect < tolerances_.storage && remaining < tolerances_.unknown && imbalance_ < 1.0)
+      return true;
     stale = contraction > kWorstContraction || !(defect < kWorstContraction * old_defect);
     previous = largest;
   }

@@ -14,9 +14,8 @@
 namespace ringwright::solver {
 namespace {
 
-// Newton's tolerances as parts of the error allowed per step. The defect of the storage is
-// what the water balance is made of, hence the small share.
-constexpr double kStorageShare = 0.0005;
+// Newton's tolerance as a part of the error allowed per step.
+constexpr double kStorageShare = 0.002;
 constexpr double kUnknownTolerance = 2e-5;  // [m]
 constexpr double kNoWeight = 1e-30;         // totals do not take part in the error test
 constexpr int kMaxOrder = 3;
