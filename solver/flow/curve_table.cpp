@@ -14,9 +14,6 @@ constexpr int kSmallestBits = 3, kLargestBits = 11;
 // With an entry head of 0 the slope of Kr may be infinite there; the last stretch is a chord.
 constexpr double kLastStretch = 1e-4;  // [m]
 
-double cubic(const double c[4], double t) { return c[0] + t * (c[1] + t * (c[2] + t * c[3])); }
-double cubic_slope(const double c[4], double t) { return c[1] + t * (2 * c[2] + t * 3 * c[3]); }
-
 void hermite(double c[4], double width, double f0, double d0, double f1, double d1) {
   const double secant = (f1 - f0) / width;
   c[0] = f0;
@@ -40,10 +37,6 @@ double integral_of_conductivity(const models::Curves& curves, double from, doubl
 }
 
 double just_below(double h) { return std::nextafter(h, -1e30) - 1e-13 * std::abs(h); }
-
-std::int64_t key(double x, int shift) {
-  return static_cast<std::int64_t>(std::bit_cast<std::uint64_t>(x) >> shift);
-}
 
 }  // namespace
 
@@ -188,31 +181,6 @@ CurvePoint CurveTable::beyond_table(double Se) const {
   const double K = driest_K_ * std::pow(r, power_K_);
   const double Phi = driest_Phi_ * std::pow(r, power_Phi_);
   return {Se, slope_, Phi, power_Phi_ * Phi / Se * slope_, K, power_K_ * K / Se * slope_};
-}
-
-CurvePoint CurveTable::dry_point(double u) const {
-  const double x = std::min(switch_saturation_ + (u - switch_) * slope_, switch_saturation_);
-  if (x < driest_tabled_) return beyond_table(std::max(x, 1e-300));
-  const auto i = std::min<std::int64_t>(key(x, dry_branch_.shift) - dry_branch_.first,
-                                        static_cast<std::int64_t>(dry_.size()) - 1);
-  const Bin& b = dry_[static_cast<std::size_t>(i)];
-  const double t = x - b.x0;
-  return {x,
-          slope_,
-          cubic(b.Phi, t),
-          cubic_slope(b.Phi, t) * slope_,
-          cubic(b.K, t),
-          cubic_slope(b.K, t) * slope_};
-}
-
-CurvePoint CurveTable::wet_point(double u) const {
-  const double x = std::max(-u, 0.0);
-  const auto i = std::clamp<std::int64_t>(key(x, wet_branch_.shift) - wet_branch_.first, 0,
-                                          static_cast<std::int64_t>(wet_.size()) - 1);
-  const Bin& b = wet_[static_cast<std::size_t>(i)];
-  const double t = x - b.x0;
-  return {cubic(b.Se, t),         -cubic_slope(b.Se, t), cubic(b.Phi, t),
-          -cubic_slope(b.Phi, t), cubic(b.K, t),         -cubic_slope(b.K, t)};
 }
 
 double CurveTable::u_of_head(double h) const {

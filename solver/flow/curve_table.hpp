@@ -23,6 +23,8 @@
 /// A table is immutable and depends on the curve alone (not on Ks, theta_r, theta_s):
 /// share it between runs and threads.
 
+#include <algorithm>
+#include <bit>
 #include <cstdint>
 #include <memory>
 #include <vector>
@@ -76,8 +78,39 @@ class CurveTable {
     std::int64_t first = 0;
   };
 
-  CurvePoint dry_point(double u) const;
-  CurvePoint wet_point(double u) const;
+  static double cubic(const double c[4], double t) {
+    return c[0] + t * (c[1] + t * (c[2] + t * c[3]));
+  }
+  static double cubic_slope(const double c[4], double t) {
+    return c[1] + t * (2 * c[2] + t * 3 * c[3]);
+  }
+  static std::int64_t key(double x, int shift) {
+    return static_cast<std::int64_t>(std::bit_cast<std::uint64_t>(x) >> shift);
+  }
+  // In the header: at() is called for every cell in every iteration.
+  CurvePoint dry_point(double u) const {
+    const double x = std::min(switch_saturation_ + (u - switch_) * slope_, switch_saturation_);
+    if (x < driest_tabled_) return beyond_table(std::max(x, 1e-300));
+    const auto i = std::min<std::int64_t>(key(x, dry_branch_.shift) - dry_branch_.first,
+                                          static_cast<std::int64_t>(dry_.size()) - 1);
+    const Bin& b = dry_[static_cast<std::size_t>(i)];
+    const double t = x - b.x0;
+    return {x,
+            slope_,
+            cubic(b.Phi, t),
+            cubic_slope(b.Phi, t) * slope_,
+            cubic(b.K, t),
+            cubic_slope(b.K, t) * slope_};
+  }
+  CurvePoint wet_point(double u) const {
+    const double x = std::max(-u, 0.0);
+    const auto i = std::clamp<std::int64_t>(key(x, wet_branch_.shift) - wet_branch_.first, 0,
+                                            static_cast<std::int64_t>(wet_.size()) - 1);
+    const Bin& b = wet_[static_cast<std::size_t>(i)];
+    const double t = x - b.x0;
+    return {cubic(b.Se, t),         -cubic_slope(b.Se, t), cubic(b.Phi, t),
+            -cubic_slope(b.Phi, t), cubic(b.K, t),         -cubic_slope(b.K, t)};
+  }
   CurvePoint beyond_table(double Se) const;
   void build_dry();
   void build_wet();

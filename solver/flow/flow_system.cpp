@@ -100,16 +100,6 @@ void FlowSystem::set_state(std::span<const double> u) {
   }
 }
 
-double FlowSystem::storage(int i) const {
-  const auto k = static_cast<std::size_t>(i);
-  return fillable_ * point_[k].Se + soil_.specific_storage * std::max(u_[k], 0.0);
-}
-
-double FlowSystem::storage_slope(int i) const {
-  const auto k = static_cast<std::size_t>(i);
-  return fillable_ * point_[k].dSe + (u_[k] > 0.0 ? soil_.specific_storage : 0.0);
-}
-
 double FlowSystem::storage_of_u(double u) const {
   return fillable_ * table_->at(u).Se + soil_.specific_storage * std::max(u, 0.0);
 }

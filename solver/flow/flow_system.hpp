@@ -21,6 +21,7 @@
 /// Pitfalls: across a face between two materials Phi differs by material and the Kirchhoff
 /// difference is wrong; this class therefore takes one material.
 
+#include <algorithm>
 #include <memory>
 #include <span>
 #include <vector>
@@ -51,8 +52,14 @@ class FlowSystem {
   void set_state(std::span<const double> u);
 
   /// Storage W of a cell [-] at the state set, and its slope dW/du [1/m].
-  double storage(int i) const;
-  double storage_slope(int i) const;
+  double storage(int i) const {
+    const auto k = static_cast<std::size_t>(i);
+    return fillable_ * point_[k].Se + soil_.specific_storage * std::max(u_[k], 0.0);
+  }
+  double storage_slope(int i) const {
+    const auto k = static_cast<std::size_t>(i);
+    return fillable_ * point_[k].dSe + (u_[k] > 0.0 ? soil_.specific_storage : 0.0);
+  }
   const CurvePoint& point(int i) const { return point_[static_cast<std::size_t>(i)]; }
   double storage_of_u(double u) const;
 

@@ -23,9 +23,10 @@ KluSolver::KluSolver(const SparsePattern& pattern) : handles_(std::make_unique<H
   Handles& h = *handles_;
   klu_defaults(&h.common);
   // The matrix is irreducible and close to an M-matrix: no block triangular form, no
-  // scaling, and the diagonal as pivot unless it is tiny.
+  // scaling (nor a check of the indices at every factorisation, which 0 would ask for), and
+  // the diagonal as pivot unless it is tiny.
   h.common.btf = 0;
-  h.common.scale = 0;
+  h.common.scale = -1;
   h.common.tol = 1e-3;
   h.column_starts = pattern.column_starts;
   h.rows = pattern.rows;
