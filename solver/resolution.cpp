@@ -17,9 +17,10 @@ Resolution resolution_for(const TestSetup& setup, double accuracy, double capill
   r.tip_cell = std::min(r.tip_cell, d > 0.0 ? d / 2 : setup.ring.wall / 2);
   const double wetted = wetted_depth_estimate(setup, lambda, first_time);
   r.top_cell = std::min(0.025 * std::sqrt(accuracy / 0.01) * wetted, 2 * r.tip_cell);
-  r.growth = accuracy >= 0.005 ? 1.6 : 1.4;
-  r.growth_down = accuracy >= 0.005 ? 1.35 : 1.25;
-  r.growth_inside = accuracy >= 0.005 ? 1.2 : 1.15;
+  const double finer = std::pow(accuracy / 0.01, 0.35);
+  r.growth = std::pow(1.6, finer);
+  r.growth_down = std::pow(1.35, finer);
+  r.growth_inside = std::pow(1.2, finer);
   const double fillable = setup.soil.theta_s - setup.soil.water_content(setup.initial_head);
   r.theta_tolerance = std::min(0.005, 0.015 * fillable) * std::min(1.0, accuracy / 0.01);
   return r;

@@ -16,7 +16,12 @@ namespace ringwright::postprocess {
 namespace {
 
 constexpr double kVolumesFrom = 0.05;  // of the stop: when volumes are promised
-constexpr int kMostRefinements = 5;
+constexpr int kMostRefinements = 6;
+constexpr double kMeshShare = 0.6;  // of the accuracy, aimed at for the mesh when refining
+// The estimate is two to four times the error: begin finer than the accuracy needs, so that one
+// set of runs mostly does.
+constexpr double kBeginAt = 0.6;
+constexpr double kBeginTolerance = 0.5;
 constexpr int kMostCells = 40000;
 constexpr double kPeakInterval = 60.0;  // [s]
 constexpr int kSnapshots = 12;
@@ -127,7 +132,8 @@ void Answering::run_until_accurate() {
   first_resolution_ =
       solver::resolution_for(setup_, accuracy, lambda, kVolumesFrom * setup_.duration);
   const double stop = pilot_stop(first_resolution_.coarser());
-  resolution_ = solver::resolution_for(setup_, accuracy, lambda, kVolumesFrom * stop);
+  resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
+  resolution_.theta_tolerance *= kBeginTolerance;
   for (;; ++answer_.refinements) {
     CompanionRuns next =
         run_companions(setup_, resolution_, table_, question().threads, observe(0.1, 0.9));
@@ -150,10 +156,10 @@ void Answering::run_until_accurate() {
 // Errors of the mesh fall about with the square of the cell size, those of time with the tolerance.
 void Answering::refine(solver::Resolution& resolution) const {
   const double accuracy = question().accuracy;
-  if (worst_.time_part > 0.4 * accuracy) resolution.theta_tolerance *= 0.3;
-  if (worst_.mesh_part > 0.5 * accuracy)
-    resolution =
-        resolution.scaled(std::clamp(std::sqrt(0.7 * accuracy / worst_.mesh_part), 0.4, 0.85));
+  if (worst_.time_part > 0.3 * accuracy) resolution.theta_tolerance *= 0.3;
+  if (worst_.mesh_part > kMeshShare * accuracy)
+    resolution = resolution.scaled(
+        std::clamp(std::sqrt(kMeshShare * accuracy / worst_.mesh_part), 0.4, 0.9));
 }
 
 void Answering::read() {

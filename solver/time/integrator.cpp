@@ -19,6 +19,7 @@ constexpr double kStorageShare = 0.002;
 constexpr double kUnknownTolerance = 2e-5;  // [m]
 constexpr double kNoWeight = 1e-30;         // totals do not take part in the error test
 constexpr int kMaxOrder = 3;
+constexpr long kMostSteps = 20000;             // per leg; a test takes some hundred
 constexpr double kLargestExtrapolation = 0.5;  // of u, per step [m]
 
 }  // namespace
@@ -39,7 +40,7 @@ struct Integrator::Impl {
   double u_rate_span = 0.0;  // length of the step from u_before to u; 0: none yet
   std::exception_ptr error;
   IntegratorStatistics earlier;  // of legs before the last start
-  long newton_failures = 0;
+  long newton_failures = 0, steps_in_leg = 0;
   int call_failures = 0, call_iterations = 0;
   bool initialised = false;
 
@@ -68,6 +69,7 @@ struct Integrator::Impl {
   void guess(double t_new, std::span<const double> W);
   void check(int flag, const char* what) const;
   [[noreturn]] void fail(int flag) const;
+  [[noreturn]] void fail_because(const std::string& cause) const;
 };
 
 void Integrator::Impl::make_nonlinear_solver() {
@@ -134,7 +136,6 @@ void Integrator::Impl::make_ida() {
   check(IDASetUserData(ida.get(), this), "IDASetUserData");
   check(IDAWFtolerances(ida.get(), weights), "IDAWFtolerances");
   check(IDASetMaxOrd(ida.get(), kMaxOrder), "IDASetMaxOrd");
-  check(IDASetMaxNumSteps(ida.get(), 20000), "IDASetMaxNumSteps");
   check(IDASetMaxConvFails(ida.get(), 30), "IDASetMaxConvFails");
   check(IDASetMaxErrTestFails(ida.get(), 30), "IDASetMaxErrTestFails");
   check(IDASetNonlinearSolver(ida.get(), nonlinear.get()), "IDASetNonlinearSolver");
@@ -194,6 +195,10 @@ void Integrator::Impl::fail(int flag) const {
   char* name = IDAGetReturnFlagName(flag);
   const std::string reason = name ? name : "unknown";
   std::free(name);
+  fail_because("the time step became too small or the iteration did not converge (" + reason + ")");
+}
+
+void Integrator::Impl::fail_because(const std::string& cause) const {
   realtype step = 0.0;
   IDAGetCurrentStep(ida.get(), &step);
   const auto defects = newton.last_defects();
@@ -211,9 +216,7 @@ void Integrator::Impl::fail(int flag) const {
   std::partial_sort(cells.begin(), cells.begin() + count, cells.end(),
                     [](const WorstCell& a, const WorstCell& b) { return a.size > b.size; });
   cells.resize(static_cast<std::size_t>(count));
-  throw SolverFailure(
-      "the time step became too small or the iteration did not converge (" + reason + ")", t, step,
-      std::move(cells));
+  throw SolverFailure(cause, t, step, std::move(cells));
 }
 
 Integrator::Integrator(FlowSystem& flow, double theta_tolerance)
@@ -223,6 +226,7 @@ Integrator::~Integrator() = default;
 void Integrator::start(double t, std::span<const double> u) {
   Impl& s = *impl_;
   s.error = nullptr;
+  s.steps_in_leg = 0;
   s.t = s.t_before = s.t_start = t;
   std::copy(u.begin(), u.end(), s.u.begin());
   s.u_before = s.u;
@@ -249,6 +253,8 @@ void Integrator::start(double t, std::span<const double> u) {
 double Integrator::step(double stop) {
   Impl& s = *impl_;
   s.check(IDASetStopTime(s.ida.get(), stop), "IDASetStopTime");
+  if (++s.steps_in_leg > kMostSteps)
+    s.fail_because("more than " + std::to_string(kMostSteps) + " time steps");
   realtype reached = s.t;
   const int flag = IDASolve(s.ida.get(), stop, &reached, s.y.get(), s.yp.get(), IDA_ONE_STEP);
   if (flag < 0) s.fail(flag);

@@ -36,7 +36,8 @@ class Integrator {
 
   /// Begins at time t [s] from unknowns u [m]; totals start from 0.
   void start(double t, std::span<const double> u);
-  /// One accepted step, not beyond `stop`. @return the time reached @throws SolverFailure
+  /// One accepted step, not beyond `stop`. @return the time reached
+  /// @throws SolverFailure when it cannot, or after 20000 steps since the start
   double step(double stop);
 
   double time() const;
