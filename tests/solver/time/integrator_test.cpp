@@ -127,6 +127,27 @@ TEST_CASE("water forced into a closed full column fails with time and worst cell
   CHECK(failed);
 }
 
+// Each of a million swings wants its own steps: the run is ended, with the time reached.
+TEST_CASE("a run that creeps is ended after very many steps", "[solver][time]") {
+  const models::Soil soil = class_soil("sand");
+  const Condition shaking{Boundary::head,
+                          [](double t, double) { return -0.3 + 0.25 * std::sin(2 * t); }, true};
+  FlowSystem flow(column_mesh(equal_edges(0.0, -0.01, 3)), soil,
+                  std::make_shared<CurveTable>(soil.curves), {shaking, {}});
+  Integrator integrator(flow, 1e-4);
+  integrator.start(0.0, uniform_state(flow, -0.3));
+  bool failed = false;
+  try {
+    while (integrator.time() < 3e6) integrator.step(3e6);
+  } catch (const SolverFailure& failure) {
+    failed = true;
+    CHECK(failure.time == integrator.time());
+    CHECK(failure.time < 3e6);
+    CHECK(std::string(failure.what()).find("steps") != std::string::npos);
+  }
+  CHECK(failed);
+}
+
 TEST_CASE("a boundary value that is not a number fails instead of running on", "[solver][time]") {
   const models::Soil soil = class_soil("loam");
   FlowSystem flow(graded_column(), soil, std::make_shared<CurveTable>(soil.curves),
