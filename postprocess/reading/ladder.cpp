@@ -92,7 +92,13 @@ Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
     row.above_steady = runs.above_steady(from > 1e-9 * t ? from : 0.0, t);
     row.stops_here = std::abs(t - stop) <= 1e-9 * stop;
     if (t >= kVolumesFrom * stop) worst.promise(row.soil_volume, volume);
-    if (t >= kRatesFrom * stop) worst.promise(runs.figure(flow), flow);
+    const auto over_steady = [&](const solver::TestRun& r) {
+      return flow(r) / (&r == &runs.fine ? runs.steady_fine : runs.steady_coarse).ring_flow;
+    };
+    if (t >= kRatesFrom * stop) {
+      worst.promise(runs.figure(flow), flow);
+      worst.promise(row.above_steady, over_steady);  // relative to the flow, not to the excess
+    }
     ladder.rows.push_back(std::move(row));
   }
   const Figure steady = runs.steady_flow();
