@@ -13,7 +13,7 @@ constexpr double kLooser = 10.0;
 
 // @param least smallest error that may be stated
 Figure combine(double fine, double coarse, double loose, double least) {
-  return {fine, std::abs(fine - coarse) + std::abs(coarse - loose) + std::abs(least)};
+  return {fine, std::max(std::abs(fine - coarse) + std::abs(coarse - loose), std::abs(least))};
 }
 
 }  // namespace
@@ -51,8 +51,9 @@ Figure CompanionRuns::above_steady(double from, double to) const {
   const auto excess = [&](const solver::TestRun& r, double steady) {
     return (volume_at(r, to) - volume_at(r, from)) / (to - from) / steady - 1.0;
   };
-  return combine(excess(fine, steady_fine.ring_flow), excess(coarse, steady_coarse.ring_flow),
-                 excess(loose, steady_coarse.ring_flow), floor);
+  const double value = excess(fine, steady_fine.ring_flow);
+  return combine(value, excess(coarse, steady_coarse.ring_flow),
+                 excess(loose, steady_coarse.ring_flow), floor * (value + 1.0));
 }
 
 CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,

@@ -5,9 +5,9 @@
 ///   coarse  cells twice as wide and high
 ///   loose   the coarse mesh with a ten times looser time tolerance
 ///
-/// The error of a figure f is |f_fine - f_coarse| + |f_coarse - f_loose| + a floor: the full
-/// difference, not divided by a Richardson factor, since convergence is not monotone on graded
-/// meshes. It overestimates, and is meant to. The steady flow has its own pair.
+/// The error of a figure f is |f_fine - f_coarse| + |f_coarse - f_loose|, and not below a floor:
+/// the full difference, not divided by a Richardson factor, since convergence is not monotone on
+/// graded meshes. It overestimates, and is meant to. The steady flow has its own pair.
 
 #include <functional>
 #include <memory>
@@ -46,7 +46,9 @@ CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resol
                              const solver::StepObserver& observer);
 
 /// The floor of the error for an accuracy asked for: two meshes may agree by chance, and the
-/// table, the domain and Newton's tolerance are not seen by the companions.
-inline double error_floor(double accuracy) { return 0.2 * accuracy; }
+/// table, the domain and Newton's tolerance are not seen by the companions. At a quarter, 96 and
+/// 97 of two hundreds of random cases lie within their error, and its median is 4.6 and 4.9 times
+/// the true one (validation/random_matrix).
+inline double error_floor(double accuracy) { return 0.25 * accuracy; }
 
 }  // namespace ringwright::postprocess

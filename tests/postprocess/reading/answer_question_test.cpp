@@ -124,18 +124,6 @@ TEST_CASE("the accuracy asked for is met, or the answer says that it is not", "[
     }
 }
 
-TEST_CASE("an accuracy out of reach is flagged", "[reading][slow]") {
-  Question q = ring_question("sand");
-  q.setup.duration = 600.0;
-  q.reading_interval = 60.0;
-  q.accuracy = 1e-4;
-  const Answer a = answer(q);
-  CAPTURE(a.worst_relative_error, a.refinements, a.run.statistics.cells);
-  CHECK_FALSE(a.accuracy_met);
-  CHECK(a.worst_relative_error > q.accuracy);
-  CHECK(a.worst_relative_error < 0.01);
-}
-
 TEST_CASE("progress rises within a set of runs and ends at 1", "[reading]") {
   std::vector<double> seen;
   answer(sandy_loam_question(), [&](double f) {
