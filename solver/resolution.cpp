@@ -12,7 +12,7 @@ Resolution resolution_for(const TestSetup& setup, double accuracy, double capill
   const double a = setup.ring.radius, d = setup.ring.insertion, lambda = capillary_length;
   Resolution r;
   r.splits = 0;
-  r.tip_cell = std::sqrt(0.01 * accuracy * 100 * a * lambda);
+  r.tip_cell = std::sqrt(2 * accuracy * a * (d > 0.0 ? std::min(d, lambda) : lambda));
   r.tip_cell = std::min({r.tip_cell, a / 4, lambda / 2});
   r.tip_cell = std::min(r.tip_cell, d > 0.0 ? d / 2 : setup.ring.wall / 2);
   const double wetted = wetted_depth_estimate(setup, lambda, first_time);

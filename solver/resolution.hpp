@@ -2,8 +2,8 @@
 /// From the accuracy asked for to mesh and time tolerance.
 ///
 /// What was measured on steady and transient rings (12 soils, radius 3 to 50 cm):
-///  - the square cells at the foot of the wall bring an error of about
-///    +20 % tip^2 / (a lambda), a the radius, lambda the capillary length;
+///  - the square cells at the foot of the wall bring an error of about +0.1 to +0.2 times
+///    tip^2 / (a min(d, lambda)), a the radius, d the insertion, lambda the capillary length;
 ///  - the uppermost cells matter early: they must resolve the wetted depth;
 ///  - growth matters little once cell centres are geometric (grading.hpp);
 ///  - time errors fall away quickly: late volumes hardly notice the tolerance.

@@ -32,7 +32,10 @@ std::vector<double> first_potentials(const SteadyRing& p, const CellsAndFaces& m
 
 SteadyFlow steady_flow(const SteadyRing& problem, const Resolution& resolution,
                        std::shared_ptr<const CurveTable> table, const Domain& domain) {
-  const CellsAndFaces mesh = ring_mesh(problem.ring, domain, resolution);
+  // No front to resolve: the thin uppermost cells of the transient mesh are not needed.
+  Resolution steady = resolution;
+  steady.top_cell = std::max(steady.top_cell, steady.tip_cell);
+  const CellsAndFaces mesh = ring_mesh(problem.ring, domain, steady);
   std::vector<double> Phi = first_potentials(problem, mesh, *table);
   FlowSystem flow(mesh, problem.soil, std::move(table), ring_conditions(mesh, problem.pond_head));
   const SteadyResult found = solve_steady(flow, Phi);

@@ -9,8 +9,9 @@ namespace ringwright::solver {
 namespace {
 
 constexpr int kMostIterations = 200;
-constexpr double kLargestDefect = 1e-7;  // of the inflow, in any cell
-constexpr double kLargestChange = 1e-8;  // of the largest potential
+constexpr double kLargestDefect = 1e-7;    // of the inflow, in any cell
+constexpr double kLargestRounding = 1e-5;  // the same where flat cells leave rounding errors
+constexpr double kLargestChange = 1e-8;    // of the largest potential
 
 class SteadyNewton {
  public:
@@ -102,6 +103,13 @@ SteadyResult SteadyNewton::run() {
       move(share);
       next = defect(trial_);
       better = next < (1.0 - 1e-4 * share) * now || next < 1e-12 * inflow_;
+    }
+    // No step is better and none is left to take: rounding is what remains.
+    if (!better && damping == 0.0 && result.largest_defect < kLargestRounding &&
+        move(1.0) < kLargestChange * top) {
+      result.converged = true;
+      defect(Phi_);
+      break;
     }
     if (better || damping > 1e3) {
       std::copy(trial_.begin(), trial_.end(), Phi_.begin());

@@ -23,7 +23,7 @@ namespace ringwright::solver {
 
 struct NewtonTolerances {
   double storage = 1e-5;  ///< largest defect r / (c V) accepted [-]
-  double balance = 1e-7;  ///< sum of the defects over the flow through the boundary [-]
+  double balance = 5e-7;  ///< sum of the defects over the flow through the boundary [-]
   double unknown = 2e-4;  ///< largest remaining error of u accepted [m]
   int iterations = 16;    ///< most per step
 };
