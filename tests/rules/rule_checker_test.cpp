@@ -54,15 +54,17 @@ TEST_CASE("each floor is above the one before", "[rules]") {
   }
 }
 
-TEST_CASE("tests and validation are seen by none and see all", "[rules]") {
+TEST_CASE("tests and validation are seen by no floor and see all", "[rules]") {
   const auto tree = tree_of({{"cases/a.cpp", including("\"tests/t.hpp\"")},
                              {"tests/t.hpp", including("\"cases/b.hpp\"")},
                              {"tests/u_test.cpp", including("\"tests/t.hpp\"")},
                              {"validation/v_check.cpp", including("\"tests/t.hpp\"")},
+                             {"validation/v.hpp", ""},
+                             {"tests/w_test.cpp", including("\"validation/v.hpp\"")},
                              {"cases/b.hpp", ""}});
   CHECK(listing(upward_includes(tree)) ==
         "cases/a.cpp:1: cases must not include tests\n"
-        "validation/v_check.cpp:1: validation must not include tests\n");
+        "tests/w_test.cpp:1: tests must not include validation\n");
 }
 
 TEST_CASE("includes relative to the file are found", "[rules]") {

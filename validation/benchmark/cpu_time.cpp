@@ -1,6 +1,6 @@
 #include "validation/benchmark/cpu_time.hpp"
 
-#include <time.h>
+#include <ctime>
 
 #include <algorithm>
 #include <barrier>
