@@ -28,7 +28,8 @@ class Attempt {
         flow_(mesh_, setup.soil, std::move(table), ring_conditions(mesh_, setup.pond_head)),
         patches_(ring_patches(mesh_)),
         integrator_(flow_, resolution.theta_tolerance),
-        u_(static_cast<std::size_t>(flow_.cells()), flow_.table().u_of_head(setup.initial_head)) {
+        u_(static_cast<std::size_t>(flow_.cells()), flow_.table().u_of_head(setup.initial_head)),
+        storage_(u_.size()) {
     run_.statistics.cells = flow_.cells();
     run_.statistics.domain_radius = domain.radius;
     run_.statistics.domain_depth = domain.depth;
@@ -59,7 +60,7 @@ class Attempt {
   FlowSystem flow_;
   RingPatches patches_;
   Integrator integrator_;
-  std::vector<double> u_;
+  std::vector<double> u_, storage_;
   double stored_at_start_ = 0.0;
   TestRun run_;
 };
@@ -73,7 +74,9 @@ void Attempt::sample(double t) {
   s.ring_flow = -flow[patches_.ring];
   s.drainage_volume = volume[patches_.bottom];
   s.seepage_volume = volume[patches_.outside];
+  integrator_.storage_at(t, storage_);
   s.stored_volume = integrator_.stored_at(t) - stored_at_start_;
+  s.wetted = wetted();
   run_.samples.push_back(s);
 }
 
@@ -133,7 +136,6 @@ void Attempt::finish() {
   const IntegratorStatistics i = integrator_.statistics();
   s.steps = i.steps, s.newton_iterations = i.newton_iterations;
   s.factorisations = i.factorisations, s.convergence_failures = i.convergence_failures;
-  run_.wetted = wetted();
   run_.drawing = mesh_.drawing;
 }
 
@@ -144,17 +146,17 @@ Wetted Attempt::wetted() const {
   const auto& centres = mesh_.drawing.centres;
   const std::size_t columns = this->columns();
   const auto end = [&](std::size_t inner, std::size_t outer, int axis) {
-    const double a = content(u_[inner]), b = content(u_[outer]);
+    const double a = storage_[inner], b = storage_[outer];
     const auto k = static_cast<std::size_t>(axis);
     return centres[inner][k] + (a - limit) / (a - b) * (centres[outer][k] - centres[inner][k]);
   };
   Wetted w;
-  for (std::size_t c = 0; c < u_.size(); ++c) {
-    if (content(u_[c]) < limit) continue;
+  for (std::size_t c = 0; c < storage_.size(); ++c) {
+    if (storage_[c] < limit) continue;
     const std::size_t below = c + columns, right = c + 1;
-    if (below < u_.size() && content(u_[below]) < limit)
+    if (below < storage_.size() && storage_[below] < limit)
       w.depth = std::max(w.depth, -end(c, below, 1));
-    if (right % columns != 0 && content(u_[right]) < limit)
+    if (right % columns != 0 && storage_[right] < limit)
       w.beyond_wall = std::max(w.beyond_wall, end(c, right, 0) - setup_.ring.radius);
   }
   return w;

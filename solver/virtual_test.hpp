@@ -44,6 +44,13 @@ struct Resolution {
   Resolution scaled(double share) const;
 };
 
+/// Extent of the ground wetted by the test: where theta rose by more than 5 % of (theta_s -
+/// theta_initial).
+struct Wetted {
+  double depth = 0.0;        ///< below the soil surface [m]
+  double beyond_wall = 0.0;  ///< horizontally outside the wall [m]
+};
+
 /// State of the totals at one time; volumes since the start, all for the full circle.
 struct Sample {
   double time = 0.0;         ///< [s]
@@ -53,19 +60,13 @@ struct Sample {
       0.0;  ///< out of the bottom, drainage of the initial profile included [m3]
   double seepage_volume = 0.0;  ///< out of the surface outside the ring [m3]
   double stored_volume = 0.0;   ///< change of the water stored in the soil [m3]
+  Wetted wetted;                ///< ground wetted so far
 };
 
 struct Snapshot {
   double time = 0.0;                  ///< [s]
   std::vector<double> head;           ///< pressure head per cell [m]
   std::vector<double> water_content;  ///< per cell [-]
-};
-
-/// Extent of the ground wetted by the test: where theta rose by more than 5 % of (theta_s -
-/// theta_initial).
-struct Wetted {
-  double depth = 0.0;        ///< below the soil surface [m]
-  double beyond_wall = 0.0;  ///< horizontally outside the wall [m]
 };
 
 struct RunStatistics {
@@ -80,7 +81,6 @@ struct TestRun {
   std::vector<Sample> samples;  ///< one per wanted time (fewer if interrupted)
   std::vector<Snapshot> snapshots;
   Drawing drawing;
-  Wetted wetted;  ///< at the last sample
   RunStatistics statistics;
   bool interrupted = false;
 };

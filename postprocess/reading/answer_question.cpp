@@ -20,7 +20,7 @@ constexpr int kMostRefinements = 6;
 constexpr double kMeshShare = 0.6;  // of the accuracy, aimed at for the mesh when refining
 // The estimate is two to four times the error: begin finer than the accuracy needs, so that one
 // set of runs mostly does.
-constexpr double kBeginAt = 0.6;
+constexpr double kBeginAt = 0.36;
 constexpr double kBeginTolerance = 0.5;
 constexpr int kMostCells = 40000;
 constexpr double kPeakInterval = 60.0;  // [s]
@@ -130,7 +130,7 @@ double Answering::pilot_stop(const solver::Resolution& resolution) {
 void Answering::run_until_accurate() {
   const double lambda = table_->capillary_length(), accuracy = question().accuracy;
   first_resolution_ =
-      solver::resolution_for(setup_, accuracy, lambda, kVolumesFrom * setup_.duration);
+      solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * setup_.duration);
   const double stop = pilot_stop(first_resolution_.coarser());
   resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
   resolution_.theta_tolerance *= kBeginTolerance;
@@ -194,9 +194,11 @@ Answer Answering::run() {
   } else {
     answer_.peak_flow = volume_at(runs_.fine, std::min(kPeakInterval, setup_.duration)) /
                         std::min(kPeakInterval, setup_.duration);
-    answer_.wetted_depth = runs_.figure([](const solver::TestRun& r) { return r.wetted.depth; });
-    answer_.wetted_beyond_wall =
-        runs_.figure([](const solver::TestRun& r) { return r.wetted.beyond_wall; });
+    const double stop = answer_.record.readings.back().time;
+    answer_.wetted_depth =
+        runs_.figure([stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.depth; });
+    answer_.wetted_beyond_wall = runs_.figure(
+        [stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.beyond_wall; });
     answer_.time_to_steady = time_to_steady(setup_, first_resolution_, table_);
   }
   answer_.run = std::move(runs_.fine);

@@ -18,13 +18,16 @@ Figure combine(double fine, double coarse, double loose, double least) {
 
 }  // namespace
 
-double volume_at(const solver::TestRun& run, double t) {
-  if (t == 0.0) return 0.0;
+const solver::Sample& sample_at(const solver::TestRun& run, double t) {
   const auto it = std::lower_bound(run.samples.begin(), run.samples.end(), t * (1 - 1e-12),
                                    [](const solver::Sample& s, double x) { return s.time < x; });
   if (it == run.samples.end() || it->time > t * (1 + 1e-12))
     throw std::out_of_range("no sample at this time");
-  return it->ring_volume;
+  return *it;
+}
+
+double volume_at(const solver::TestRun& run, double t) {
+  return t == 0.0 ? 0.0 : sample_at(run, t).ring_volume;
 }
 
 Figure CompanionRuns::figure(const std::function<double(const solver::TestRun&)>& f) const {

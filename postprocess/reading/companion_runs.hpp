@@ -35,6 +35,10 @@ struct CompanionRuns {
   Figure above_steady(double from, double to) const;
 };
 
+/// The sample at a time that was sampled.
+/// @throws std::out_of_range for a time that was not
+const solver::Sample& sample_at(const solver::TestRun& run, double t);
+
 /// Cumulative volume [m3] at a time that was sampled; 0 at time 0.
 /// @throws std::out_of_range for a time that was not
 double volume_at(const solver::TestRun& run, double t);

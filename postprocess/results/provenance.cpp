@@ -60,6 +60,7 @@ nlohmann::json tolerances_json(const Provenance& provenance) {
     found["tip_cell"] = metres(resolution->tip_cell);
     found["top_cell"] = metres(resolution->top_cell);
     found["growth"] = fraction(resolution->growth);
+    found["growth_down"] = fraction(resolution->growth_down);
     found["growth_inside"] = fraction(resolution->growth_inside);
     found["splits"] = resolution->splits;
     found["theta_tolerance"] = fraction(resolution->theta_tolerance);

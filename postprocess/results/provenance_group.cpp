@@ -35,6 +35,8 @@ void put_tolerances(hid_t parent, const Provenance& provenance) {
                {"m", "height of the uppermost cells, before splitting"});
   write_scalar(group.id(), "growth", resolution.growth,
                {"1", "largest ratio of neighbouring cells, before splitting"});
+  write_scalar(group.id(), "growth_down", resolution.growth_down,
+               {"1", "the same downwards below the foot of the wall"});
   write_scalar(group.id(), "growth_inside", resolution.growth_inside,
                {"1", "the same between surface and foot of the wall"});
   write_scalar(group.id(), "splits", std::int64_t{resolution.splits},

@@ -287,6 +287,12 @@ double Integrator::stored_at(double t) const {
   return sum;
 }
 
+void Integrator::storage_at(double t, std::span<double> W) const {
+  Impl& s = *impl_;
+  s.check(IDAGetDky(s.ida.get(), t, 0, s.work.get()), "IDAGetDky");
+  std::copy_n(s.data(s.work.get()), s.n, W.begin());
+}
+
 void Integrator::u_at(double t, std::span<double> u) const {
   const Impl& s = *impl_;
   const double w = s.t > s.t_before ? (t - s.t_before) / (s.t - s.t_before) : 1.0;

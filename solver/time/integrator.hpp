@@ -47,6 +47,8 @@ class Integrator {
   void totals_at(double t, std::span<double> volumes, std::span<double> flows) const;
   /// Water stored in all cells at t within the last step [m3].
   double stored_at(double t) const;
+  /// Storage W of each cell at t within the last step [-].
+  void storage_at(double t, std::span<double> W) const;
   /// Unknowns at t within the last step, linear between its ends.
   void u_at(double t, std::span<double> u) const;
   IntegratorStatistics statistics() const;

@@ -54,10 +54,14 @@ inline solver::TestRun three_snapshots() {
       snapshot.water_content.push_back(0.1 + 0.01 * cell + std::sqrt(0.001 * time));
     }
     run.snapshots.push_back(snapshot);
-    run.samples.push_back({snapshot.time, 1e-3 * std::sqrt(time), 1e-7 / time, 1e-9 * time,
-                           1e-11 * time, 1e-3 * std::sqrt(time) - 1e-9 * time});
+    run.samples.push_back({snapshot.time,
+                           1e-3 * std::sqrt(time),
+                           1e-7 / time,
+                           1e-9 * time,
+                           1e-11 * time,
+                           1e-3 * std::sqrt(time) - 1e-9 * time,
+                           {0.3, 0.07}});
   }
-  run.wetted = {0.3, 0.07};
   run.statistics.cells = 6;
   run.statistics.steps = 321;
   run.statistics.newton_iterations = 987;
