@@ -84,8 +84,7 @@ class Answering {
     setup_ = question.setup;
     setup_.times = wanted_times(question);
     for (int k = 1; k <= kSnapshots; ++k)  // denser early, when the wetted body grows fastest
-      setup_.snapshots.push_back(setup_.duration *
-                                 std::pow(static_cast<double>(k) / kSnapshots, 2));
+      setup_.snapshots.push_back(setup_.duration * (k * k) / (kSnapshots * kSnapshots));
   }
 
   Answer run();
@@ -132,6 +131,7 @@ void Answering::run_until_accurate() {
   first_resolution_ =
       solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * setup_.duration);
   const double stop = pilot_stop(first_resolution_.coarser());
+  add_times(setup_.snapshots, {stop});
   resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
   resolution_.theta_tolerance *= kBeginTolerance;
   for (;; ++answer_.refinements) {
