@@ -2,13 +2,13 @@
 
 #include <algorithm>
 #include <cmath>
-#include <exception>
 #include <limits>
 #include <string>
 #include <vector>
 
 #include "solver/failure.hpp"
 #include "solver/flow/switched_newton.hpp"
+#include "solver/time/step_solver.hpp"
 #include "solver/time/sundials_handles.hpp"
 
 namespace ringwright::solver {
@@ -24,7 +24,7 @@ constexpr double kLargestExtrapolation = 0.5;  // of u, per step [m]
 
 }  // namespace
 
-struct Integrator::Impl {
+struct Integrator::Impl final : StepSolver {
   FlowSystem& flow;
   SwitchedNewton newton;
   double tolerance;
@@ -37,11 +37,9 @@ struct Integrator::Impl {
 
   std::vector<double> u, u_before, u_trial;
   double t = 0.0, t_before = 0.0, t_start = 0.0;
-  double u_rate_span = 0.0;  // length of the step from u_before to u; 0: none yet
-  std::exception_ptr error;
+  double u_rate_span = 0.0;      // length of the step from u_before to u; 0: none yet
   IntegratorStatistics earlier;  // of legs before the last start
   long newton_failures = 0, steps_in_leg = 0;
-  int call_failures = 0, call_iterations = 0;
   bool initialised = false;
 
   Impl(FlowSystem& f, double theta_tolerance)
@@ -57,67 +55,23 @@ struct Integrator::Impl {
     y = make_vector(size, context.get());
     yp = make_vector(size, context.get());
     work = make_vector(size, context.get());
-    make_nonlinear_solver();
+    nonlinear = make_nonlinear_solver(*this, context.get());
   }
 
-  static Impl& of(SUNNonlinearSolver s) { return *static_cast<Impl*>(s->content); }
   double* data(N_Vector v) const { return N_VGetArrayPointer(v); }
 
-  void make_nonlinear_solver();
   void make_ida();
-  int solve_step(N_Vector correction);
+  int solve_step(N_Vector correction) override;
   void guess(double t_new, std::span<const double> W);
   void check(int flag, const char* what) const;
   [[noreturn]] void fail(int flag) const;
   [[noreturn]] void fail_because(const std::string& cause) const;
 };
 
-void Integrator::Impl::make_nonlinear_solver() {
-  SUNNonlinearSolver s = SUNNonlinSolNewEmpty(context.get());
-  if (!s) throw std::bad_alloc();
-  nonlinear.reset(s);
-  s->content = this;
-  s->ops->gettype = [](SUNNonlinearSolver) { return SUNNONLINEARSOLVER_ROOTFIND; };
-  s->ops->initialize = [](SUNNonlinearSolver) { return static_cast<int>(SUN_NLS_SUCCESS); };
-  s->ops->setsysfn = [](SUNNonlinearSolver, SUNNonlinSolSysFn) {
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-  s->ops->setctestfn = [](SUNNonlinearSolver, SUNNonlinSolConvTestFn, void*) {
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-  s->ops->setmaxiters = [](SUNNonlinearSolver, int) { return static_cast<int>(SUN_NLS_SUCCESS); };
-  s->ops->getnumiters = [](SUNNonlinearSolver self, long* count) {
-    *count = of(self).call_iterations;
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-  s->ops->getcuriter = [](SUNNonlinearSolver self, int* count) {
-    *count = of(self).call_iterations;
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-  s->ops->getnumconvfails = [](SUNNonlinearSolver self, long* count) {
-    *count = of(self).call_failures;
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-  s->ops->solve = [](SUNNonlinearSolver self, N_Vector, N_Vector correction, N_Vector, realtype,
-                     booleantype, void*) {
-    Impl& impl = of(self);
-    try {  // nothing may be thrown across the C library
-      return impl.solve_step(correction);
-    } catch (...) {
-      impl.error = std::current_exception();
-      return -1;
-    }
-  };
-  s->ops->free = [](SUNNonlinearSolver self) {
-    SUNNonlinSolFreeEmpty(self);
-    return static_cast<int>(SUN_NLS_SUCCESS);
-  };
-}
-
 void Integrator::Impl::make_ida() {
   ida.reset(IDACreate(context.get()));
   if (!ida) throw std::bad_alloc();
-  // The residual function is never called: the nonlinear solver above forms its own.
+  // The residual function is never called: the step solver forms its own.
   const auto unused = [](realtype, N_Vector, N_Vector, N_Vector, void*) { return -1; };
   const auto weights = [](N_Vector, N_Vector w, void* self) {
     const Impl& impl = *static_cast<Impl*>(self);
@@ -171,11 +125,11 @@ int Integrator::Impl::solve_step(N_Vector correction) {
   const std::span<const double> W(data(W_pred), n), W_rate(data(Wp_pred), n);
   flow.set_time(t_new);
   guess(t_new, W);
-  call_failures = 0;
+  failures = 0;
   const bool converged = newton.solve(W, W_rate, c, u_trial);
-  call_iterations = newton.last_iterations();
+  iterations = newton.last_iterations();
   if (!converged) {
-    call_failures = 1;
+    failures = 1;
     ++newton_failures;
     return SUN_NLS_CONV_RECVR;
   }
