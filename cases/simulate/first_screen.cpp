@@ -5,6 +5,7 @@
 #include <utility>
 #include <vector>
 
+#include "cases/simulate/formula_range.hpp"
 #include "cases/simulate/headline.hpp"
 #include "cases/simulate/ladder_table.hpp"
 #include "cases/simulate/paragraph.hpp"
@@ -62,7 +63,8 @@ std::string tables(const Case& what, const AnsweredTest& answered) {
   }
   text += ladder_table(answer) + other_ladders(what, answered);
   const std::string readings = reading_table(answer, what.ground.water_temperature);
-  if (!readings.empty()) text += "\n" + readings + "\n" + stop_details(answer);
+  if (!readings.empty())
+    text += "\n" + readings + "\n" + stop_details(answer) + formula_range(answer);
   return text + "\n";
 }
 

@@ -69,6 +69,12 @@ double rate_ratio(const AnsweredTest& answered) {
   return least > 0.0 ? most / least : 1.0;
 }
 
+// The wetted depth is not among the figures promised to the accuracy asked for.
+std::string wetted_error_words(const Answer& answer) {
+  if (!(answer.wetted_depth.error > 0.0)) return "";
+  return fmt::format(" (wetted depth: {})", about_cm(answer.wetted_depth.error));
+}
+
 std::string numerical_words(const Case& what, const AnsweredTest& answered) {
   const bool met = std::all_of(answered.answers.begin(), answered.answers.end(),
                                [](const Answer& answer) { return answer.accuracy_met; });
@@ -76,7 +82,8 @@ std::string numerical_words(const Case& what, const AnsweredTest& answered) {
     return "the numerical error of an interrupted run is not known.";
   }
   const std::string balance = fmt::format("water balance {:.0e}", worst_balance(answered));
-  const std::string error = percent(worst_error(answered));
+  const std::string error =
+      percent(worst_error(answered)) + wetted_error_words(answered.answers.front());
   if (met) return fmt::format("numerical error at most {}, {}.", error, balance);
   return fmt::format("the accuracy asked for, {}, is NOT MET: numerical error {}, {}.",
                      given_percent(what.accuracy), error, balance);

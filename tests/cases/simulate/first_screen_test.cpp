@@ -44,12 +44,14 @@ one head: 30 cm ring, 10 cm into silt loam (moist), 5 cm constant head, water 10
   Wetted at 3 h: 30 cm deep, 7.2 cm outside the wall. Nothing below that has been tested. Within
     5 % of steady after 7.5 h.
   Supply: 3.5 L to fill the ring while the soil draws up to 900 mL/min; at the stop 40 mL/min.
+  Formula outside its published range (from memory, check the paper): radius 15 cm, stated for
+    5 to 10 cm.
 
   Ground: silt loam by First & Table 1901: suction 300 cm, 25 % water, 56 % full; capillary
     length 11.2 cm.
   Assumed, change if wrong: water 10 degC; ruler 1 mm.
   Doubt about soil and site, not in these figures, far exceeds the arithmetic; numerical error
-    at most 0.4 %, water balance 2e-08.
+    at most 0.4 % (wetted depth: 0.40 cm), water balance 2e-08.
   Prediction, not a measurement. Cracks, roots, swelling, clogging and leaks along the wall are
     not in it. The local code and the licensed professional decide.
   Files  out: record.csv answer.json
@@ -77,7 +79,7 @@ TEST_CASE("a class name shows both tables, each by its name", "[screen]") {
   CHECK_THAT(screen, Contains("    silt loam by Second et al. 1902: suction 300 cm, 25 % water"));
   CHECK_THAT(screen, Contains(R"(
   Doubt about soil and site far exceeds the arithmetic: the tables alone differ x 1.62 in the
-    rate; numerical error at most 0.4 %, water balance 2e-08.
+    rate; numerical error at most 0.4 % (wetted depth: 0.40 cm), water balance 2e-08.
 )"));
 }
 
@@ -104,7 +106,8 @@ TEST_CASE("an accuracy that is not met is said with its figure", "[screen]") {
   simulation.tests[0].answers[0].accuracy_met = false;
   simulation.tests[0].answers[0].worst_relative_error = 0.023;
   CHECK_THAT(screen_of(simulation), Contains(R"(far exceeds the arithmetic; the accuracy
-    asked for, 1 %, is NOT MET: numerical error 2.3 %, water balance 2e-08.)"));
+    asked for, 1 %, is NOT MET: numerical error 2.3 % (wetted depth: 0.40 cm), water balance
+    2e-08.)"));
 }
 
 TEST_CASE("the mark of the stop tells why the test ends", "[screen]") {
@@ -151,6 +154,16 @@ TEST_CASE("an interrupted run has a screen without figures it does not have", "[
                               "goes to 10 min."));
   CHECK_THAT(screen, Contains("the numerical\n    error of an interrupted run is not known"));
   CHECK_THAT(screen, !Contains("NOT MET") && !Contains("Wetted") && !Contains("stop at "));
+}
+
+TEST_CASE("a test within the formula's published range is not flagged", "[screen]") {
+  auto simulation = test::simulation_of(1);
+  auto& ring = simulation.tests[0].answers[0].question.setup.ring;
+  ring = {0.10, 0.05};  // radius 5 to 10 cm, insertion from 3 cm, a quarter to one radius
+  CHECK_THAT(screen_of(simulation), !Contains("published range"));
+  ring = {0.10, 0.02};
+  CHECK_THAT(screen_of(simulation),
+             Contains("insertion 2 cm, stated\n    from 3 cm up; insertion over radius 0.2, stated for 0.25 to 1."));
 }
 
 TEST_CASE("no line of the screen is wider than a page", "[screen]") {

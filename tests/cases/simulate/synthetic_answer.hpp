@@ -44,6 +44,8 @@ inline postprocess::Answer answer_frame(double Kfs_at_10_degC) {
   postprocess::Answer answer;
   answer.question.setup.soil = half_full_soil(Kfs_at_10_degC);
   answer.question.setup.initial_head = -3.0;
+  answer.question.setup.ring = {0.15, 0.10};
+  answer.question.setup.pond_head = 0.05;
   answer.question.viscosity_ratio = 1.3;
   answer.question.stop_readings = 3;
   answer.question.stop_within = 0.05;
@@ -67,7 +69,7 @@ inline postprocess::Answer first_answer() {
   answer.steady_reads = {{2.14, 0.0}, {1.23, 0.0}, {1.05, 0.0}};
   answer.time_to_steady = {7.5 * 3600.0, false};
   answer.peak_flow = 0.9 * litre / 60.0;
-  answer.wetted_depth.value = 0.30;
+  answer.wetted_depth = {0.30, 0.004};
   answer.wetted_beyond_wall.value = 0.072;
   return answer;
 }
