@@ -2,6 +2,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <stdexcept>
 
 #include "solver/domain.hpp"
 #include "solver/failure.hpp"
@@ -209,6 +210,8 @@ Resolution Resolution::scaled(double share) const {
 
 TestRun run_test(const TestSetup& setup, const Resolution& resolution,
                  std::shared_ptr<const CurveTable> table, const StepObserver& observer) {
+  if (setup.initial_head >= table->entry())
+    throw std::invalid_argument("the soil is saturated before the test: there is nothing to fill");
   Domain domain = transient_domain(setup, table->capillary_length());
   for (int enlargements = 0;; ++enlargements) {
     Attempt attempt(setup, resolution, domain, table);

@@ -90,6 +90,7 @@ using StepObserver = std::function<bool(double)>;
 
 /// Runs the test.
 /// @throws SolverFailure when the integration cannot go on (time, cause, worst cells)
+/// @throws std::invalid_argument when the soil is saturated before the test
 TestRun run_test(const TestSetup& setup, const Resolution& resolution,
                  const StepObserver& observer = {});
 /// The same with a look-up table of the soil's curves made before.

@@ -42,7 +42,7 @@ struct Ground {
 struct Test {
   std::string name;
   models::SingleRing ring;
-  double wall_thickness = 0.003;  ///< [m]; weight only
+  double wall_thickness = 0.003;  ///< [m]; also in ring.wall
   models::ConstantHead protocol;
   double assumed_alpha_star = 12.0;  ///< the crew's [1/m]
   double ruler = 0.001;              ///< how finely the level is read [m]

@@ -46,7 +46,7 @@ std::vector<Line> lines_of(const CaseFlags& flags) {
   add(lines, "  ", "capillary length", "--capillary-length", flags.capillary_length);
   add(lines, "  ", "alpha star", "--alpha-star", flags.alpha_star);
   add(lines, "  ", "fillable porosity", "--fillable-porosity", flags.fillable_porosity);
-  add(lines, "  ", "Kfs", "--Kfs", flags.Kfs);
+  add(lines, "  ", "Kfs", "--kfs", flags.Kfs);
   add(lines, "  ", "moisture", "--moisture", flags.moisture);
   add(lines, "  ", "minimum capillary height", "--minimum-capillary-height",
       flags.capillary_height);

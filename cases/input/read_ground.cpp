@@ -75,6 +75,26 @@ void check_moisture(const SectionReader& section, const std::string& moisture_ke
   }
 }
 
+// A soil that is saturated before the test has nothing left to fill.
+void check_fillable(const SectionReader& section, const std::string& moisture_key,
+                    const std::string& soil_key_name, const Ground& ground, Reading& reading) {
+  const std::string key = moisture_key.empty() ? soil_key_name : moisture_key;
+  for (const SoilVariant& variant : ground.variants) {
+    const double head = initial_head(ground.moisture, variant.soil);
+    const double entry = variant.soil.curves->entry_head();
+    if (head < entry * (1 + 1e-9) || (entry == 0.0 && head < 0.0)) continue;
+    reading.contradiction(
+        section.value_place(key),
+        fmt::format("{}at suction {:.3g} cm this soil is still saturated: there is nothing to fill",
+                    section.front_of(key), -100 * head),
+        section.key_place(soil_key_name),
+        fmt::format("{}, {} drains from a suction of {:.3g} cm", variant.label, variant.source,
+                    -100 * entry),
+        "give a larger suction");
+    return;
+  }
+}
+
 // "moist" = suction 300 cm (27 % water, 63 % full)
 void echo_moisture(const std::string& moisture_key, const SectionReader& section,
                    const Ground& ground, Reading& reading) {
@@ -117,7 +137,10 @@ Ground read_ground(const LocatedNode& node, const Place& where, const Key& gramm
     for (SoilVariant& variant : ground.variants) variant.label = *name;
   }
   if (!moisture_key || ground.variants.empty()) return ground;
-  if (!ground.moisture.suction) check_moisture(section, *moisture_key, key, ground, reading);
+  if (!ground.moisture.suction)
+    check_moisture(section, *moisture_key, key, ground, reading);
+  else
+    check_fillable(section, *moisture_key, key, ground, reading);
   echo_moisture(*moisture_key, section, ground, reading);
   return ground;
 }

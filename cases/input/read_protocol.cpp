@@ -48,20 +48,23 @@ void apply_read(const SectionReader& section, const ReadWords& given, Test& test
 
 void check_readings_fit(const SectionReader& section, const ProtocolWords& own,
                         const ProtocolWords& common, const Test& test, Reading& reading) {
-  if (!(own.stop || common.stop) || !(own.read || common.read)) return;
+  if (!(own.read || common.read)) return;
   const models::ConstantHead& protocol = test.protocol;
   const int needed = protocol.stop ? protocol.stop->readings : 1;
   const double interval = protocol.reading_interval.value_or(0.0);
   if (needed * interval <= protocol.longest * (1 + 1e-9)) return;
   const Place read_place = own.read ? own.read_place : common.read_place;
-  const Place stop_place = own.stop ? own.stop_place : common.stop_place;
-  reading.contradiction(
-      read_place,
-      fmt::format("{}{} every {} take longer than the test", section.front_of("read"),
-                  needed == 1 ? "one reading" : fmt::format("{} readings", needed),
-                  time_text(interval)),
-      stop_place, fmt::format("the test ends after {}", time_text(protocol.longest)),
-      "read more often, or stop later");
+  const std::string message = fmt::format(
+      "{}{} every {} take longer than the test", section.front_of("read"),
+      needed == 1 ? "one reading" : fmt::format("{} readings", needed), time_text(interval));
+  const std::string ends = fmt::format("the test ends after {}", time_text(protocol.longest));
+  const char* hint = "read more often, or stop later";
+  if (own.stop || common.stop) {
+    reading.contradiction(read_place, message, own.stop ? own.stop_place : common.stop_place, ends,
+                          hint);
+  } else {
+    reading.problem(read_place, fmt::format("{}; {}", message, ends), hint);
+  }
 }
 
 }  // namespace

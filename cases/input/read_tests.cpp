@@ -26,10 +26,13 @@ void read_insert(const SectionReader& section, Test& test) {
 void read_wall(const SectionReader& section, Test& test, Reading& reading) {
   const auto wall = section.quantity("wall");
   if (!section.has("wall")) {
-    reading.assume(section.path_of("wall"),
-                   fmt::format("wall {:g} mm (weight only)", 1e3 * test.wall_thickness));
+    // Driven in, a wall of any thickness is the same to the flow; on the surface it covers a strip.
+    if (test.ring.insertion == 0.0)
+      reading.assume(section.path_of("wall"),
+                     fmt::format("wall {:g} mm", 1e3 * test.wall_thickness));
   }
   test.wall_thickness = wall.value_or(test.wall_thickness);
+  test.ring.wall = test.wall_thickness;
   if (wall && test.ring.radius > 0 && *wall >= test.ring.radius) {
     reading.contradiction(section.value_place("wall"),
                           section.front_of("wall") + "the wall is as thick as the ring is wide",

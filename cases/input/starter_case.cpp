@@ -31,7 +31,7 @@ tests:
     ring: 30 cm                  # inner diameter
     insert: 10 cm                # how deep the wall stands in the ground
     head: 5 cm                   # depth of water held in the ring
-    # wall: 3 mm                 # for the weight only
+    # wall: 3 mm                 # counts for a ring set on the surface (insert: 0 cm)
     # height: 40 cm              # of the ring, to check that it holds all this
   stop: 3 readings within 5 %, or 8 h    # or: after 6 h
   read: every 10 min             # may go on: ruler to 1 mm, head kept to 5 mm

@@ -70,8 +70,9 @@ struct Answer {
   Figure wetted_beyond_wall;           ///< at the stop [m]
   double initial_water_content = 0.0;  ///< [-]
   double initial_saturation = 0.0;     ///< effective saturation Se [-]
-  double own_capillary_length = 0.0;   ///< lambda of the soil between initial head and 0 [m]
-  double worst_relative_error = 0.0;   ///< largest over all promised figures [-]
+  double own_capillary_length =
+      0.0;  ///< of the soil from dryness to 0: that of the steady flow [m]
+  double worst_relative_error = 0.0;  ///< largest over all promised figures [-]
   bool accuracy_met = false;
   int refinements = 0;
   solver::TestRun run;                           ///< the finest run, with fields

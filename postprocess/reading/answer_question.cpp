@@ -2,8 +2,10 @@
 
 #include <algorithm>
 #include <cmath>
+#include <mutex>
 #include <numbers>
 
+#include "models/soil/capillary_length.hpp"
 #include "postprocess/reading/companion_runs.hpp"
 #include "postprocess/reading/ladder.hpp"
 #include "postprocess/reading/stop_rule.hpp"
@@ -25,6 +27,8 @@ constexpr double kBeginTolerance = 0.5;
 constexpr int kMostCells = 40000;
 constexpr double kPeakInterval = 60.0;  // [s]
 constexpr int kSnapshots = 12;
+// Progress told: the pilot up to the first, the time to steady from the second.
+constexpr double kPilotShare = 0.05, kSteadyShare = 0.9;
 
 void add_times(std::vector<double>& times, const std::vector<double>& more) {
   times.insert(times.end(), more.begin(), more.end());
@@ -95,11 +99,14 @@ class Answering {
   void refine(solver::Resolution& resolution) const;
   void read();
   void describe_soil();
-  solver::StepObserver observe(double from, double to) const;
+  solver::StepObserver observe(double from, double to);
+  bool report(double fraction);
 
   const Question& question() const { return answer_.question; }
 
   ProgressObserver observer_;
+  std::mutex observing_;
+  double done_ = 0.0;  // told last [-]
   std::shared_ptr<const solver::CurveTable> table_;
   solver::TestSetup setup_;
   CompanionRuns runs_;
@@ -108,10 +115,17 @@ class Answering {
   Answer answer_;
 };
 
-solver::StepObserver Answering::observe(double from, double to) const {
-  if (!observer_) return {};
+// Runs may go side by side: the user's observer is called by one thread at a time.
+bool Answering::report(double fraction) {
+  if (!observer_) return true;
+  const std::scoped_lock lock(observing_);
+  done_ = std::max(done_, fraction);
+  return observer_(done_);
+}
+
+solver::StepObserver Answering::observe(double from, double to) {
   return [this, from, to](double t) {
-    return observer_(from + (to - from) * std::sqrt(std::min(1.0, t / setup_.duration)));
+    return report(from + (to - from) * std::sqrt(std::min(1.0, t / setup_.duration)));
   };
 }
 
@@ -120,7 +134,8 @@ double Answering::pilot_stop(const solver::Resolution& resolution) {
   if (question().stop_readings == 0) return setup_.duration;
   solver::TestSetup plain = setup_;
   plain.snapshots.clear();
-  const solver::TestRun run = solver::run_test(plain, resolution, table_, observe(0.0, 0.1));
+  const solver::TestRun run =
+      solver::run_test(plain, resolution, table_, observe(0.0, kPilotShare));
   if (run.interrupted) return setup_.duration;
   const models::Record record = record_of(question(), run);
   return record.readings[stop_of(question(), record).reading].time;
@@ -134,10 +149,14 @@ void Answering::run_until_accurate() {
   add_times(setup_.snapshots, {stop});
   resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
   resolution_.theta_tolerance *= kBeginTolerance;
+  double from = kPilotShare;
   for (;; ++answer_.refinements) {
-    CompanionRuns next =
-        run_companions(setup_, resolution_, table_, question().threads, observe(0.1, 0.9));
-    answer_.interrupted = next.fine.interrupted;
+    // How many rounds there will be is not known: each takes half of what is left.
+    const double to = from + 0.5 * (kSteadyShare - from);
+    CompanionRuns next = run_companions(setup_, resolution_, table_, question().threads,
+                                        observe(from, to), [this] { return report(0.0); });
+    from = to;
+    answer_.interrupted = next.interrupted;
     // An interrupted refinement leaves the complete set before it.
     if (answer_.interrupted && answer_.refinements > 0) return;
     runs_ = std::move(next);
@@ -180,7 +199,7 @@ void Answering::describe_soil() {
   const double h = setup_.initial_head;
   answer_.initial_water_content = soil.water_content(h);
   answer_.initial_saturation = soil.curves->saturation(h);
-  answer_.own_capillary_length = own_capillary_length(*table_, h);
+  answer_.own_capillary_length = models::capillary_length(*soil.curves);
 }
 
 Answer Answering::run() {
@@ -199,12 +218,15 @@ Answer Answering::run() {
         runs_.figure([stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.depth; });
     answer_.wetted_beyond_wall = runs_.figure(
         [stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.beyond_wall; });
-    answer_.time_to_steady = time_to_steady(setup_, first_resolution_, table_);
+    const auto steady =
+        time_to_steady(setup_, first_resolution_, table_, [this] { return report(kSteadyShare); });
+    answer_.time_to_steady = steady.value_or(TimeToSteady{});
+    answer_.interrupted = answer_.interrupted || !steady;
   }
   answer_.run = std::move(runs_.fine);
   answer_.resolution = resolution_;
   answer_.balance_error = answer_.run.statistics.balance_error;
-  if (observer_) observer_(1.0);
+  if (!answer_.interrupted) report(1.0);
   return std::move(answer_);
 }
 

@@ -18,7 +18,8 @@ class CurveTable;
 
 namespace ringwright::postprocess {
 
-/// Called with the fraction of the work done, 0 to 1; returning false interrupts.
+/// Called with the fraction of the work done, 0 to 1, never falling; returning false interrupts.
+/// With several threads it is called from any of them, one at a time.
 using ProgressObserver = std::function<bool(double fraction_done)>;
 
 /// @param table look-up table of the soil's curves, if one was made before

@@ -61,7 +61,8 @@ Figure CompanionRuns::above_steady(double from, double to) const {
 
 CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
                              std::shared_ptr<const solver::CurveTable> table, int threads,
-                             const solver::StepObserver& observer) {
+                             const solver::StepObserver& observer,
+                             const std::function<bool()>& keep_going) {
   const auto policy = threads > 1 ? std::launch::async : std::launch::deferred;
   const solver::Resolution coarser = resolution.coarser();
   solver::Resolution looser = coarser;
@@ -72,12 +73,16 @@ CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resol
 
   CompanionRuns runs;
   std::atomic<bool> stop{false};
-  const auto unless_stopped = [&stop](double) { return !stop; };
+  const auto going = [&] {
+    if (keep_going && !keep_going()) stop = true;
+    return !stop;
+  };
+  const auto unless_stopped = [&going](double) { return going(); };
   auto others = std::async(policy, [&] {
     runs.coarse = solver::run_test(plain, coarser, table, unless_stopped);
-    if (stop) return;
+    if (!going()) return;
     runs.loose = solver::run_test(plain, looser, table, unless_stopped);
-    if (stop) return;
+    if (!going()) return;
     runs.steady_fine = solver::steady_flow(steady, resolution, table);
     runs.steady_coarse = solver::steady_flow(steady, coarser, table);
   });
@@ -89,13 +94,11 @@ CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resol
     throw;
   }
   if (runs.fine.interrupted) stop = true;
-  if (!runs.fine.interrupted) {
-    others.get();
-    return runs;
-  }
-  if (policy == std::launch::async) others.get();
+  if (!stop || policy == std::launch::async) others.get();
+  if (!stop) return runs;
   CompanionRuns only_fine;  // how far the others came depends on the machine
   only_fine.fine = std::move(runs.fine);
+  only_fine.interrupted = true;
   return only_fine;
 }
 

@@ -22,7 +22,8 @@ namespace ringwright::postprocess {
 struct CompanionRuns {
   solver::TestRun fine, coarse, loose;
   solver::SteadyFlow steady_fine, steady_coarse;
-  double floor = 0.0;  ///< least relative error of any figure [-]
+  bool interrupted = false;  ///< only `fine` is filled in, as far as it came
+  double floor = 0.0;        ///< least relative error of any figure [-]
 
   /// A figure made from any of the runs by the same function. @param f takes a TestRun
   Figure figure(const std::function<double(const solver::TestRun&)>& f) const;
@@ -44,10 +45,12 @@ const solver::Sample& sample_at(const solver::TestRun& run, double t);
 double volume_at(const solver::TestRun& run, double t);
 
 /// Runs all of them; with more than one thread side by side, with the same result.
-/// The observer sees the fine run; when it stops it, only `fine` is filled in.
+/// @param observer sees the fine run and may stop all @param keep_going asked by the others,
+/// perhaps from another thread
 CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
                              std::shared_ptr<const solver::CurveTable> table, int threads,
-                             const solver::StepObserver& observer);
+                             const solver::StepObserver& observer,
+                             const std::function<bool()>& keep_going = {});
 
 /// The floor of the error for an accuracy asked for: two meshes may agree by chance, and the
 /// table, the domain and Newton's tolerance are not seen by the companions. At a quarter, 96 and

@@ -5,6 +5,7 @@
 #include <numbers>
 
 #include "models/estimators/reynolds_elrick_single_head.hpp"
+#include "models/soil/capillary_length.hpp"
 #include "postprocess/reading/test_times.hpp"
 
 namespace ringwright::postprocess {
@@ -65,15 +66,9 @@ class WorstOf {
 
 }  // namespace
 
-double own_capillary_length(const solver::CurveTable& table, double h) {
-  const solver::CurvePoint wet = table.at(table.u_of_head(0.0)), dry = table.at(table.u_of_head(h));
-  return (wet.Phi - dry.Phi) / (1.0 - dry.K);
-}
-
 Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
   const double area = std::numbers::pi * q.setup.ring.radius * q.setup.ring.radius;
-  const solver::CurveTable table(q.setup.soil.curves);
-  const PerRate per = reads_per_rate(q, own_capillary_length(table, q.setup.initial_head));
+  const PerRate per = reads_per_rate(q, models::capillary_length(*q.setup.soil.curves));
   const double filling = area * q.setup.pond_head;
   WorstOf worst(runs);
   Ladder ladder;

@@ -25,8 +25,4 @@ struct Ladder {
 /// @param stop time at which the test ends [s], one of the sampled times
 Ladder make_ladder(const Question& question, const CompanionRuns& runs, double stop);
 
-/// Capillary length of the soil between head h and 0 [m]: flux potential between them over
-/// Ks - K(h) (White & Sully 1987, Water Resour. Res. 23:1514).
-double own_capillary_length(const solver::CurveTable& table, double h);
-
 }  // namespace ringwright::postprocess

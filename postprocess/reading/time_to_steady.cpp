@@ -22,8 +22,10 @@ std::vector<double> times_up_to(double end) {
 
 }  // namespace
 
-TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                            std::shared_ptr<const solver::CurveTable> table) {
+std::optional<TimeToSteady> time_to_steady(const solver::TestSetup& setup,
+                                           const solver::Resolution& resolution,
+                                           std::shared_ptr<const solver::CurveTable> table,
+                                           const std::function<bool()>& keep_going) {
   const double steady_flow =
       solver::steady_flow({setup.soil, setup.ring, setup.pond_head}, resolution, table).ring_flow;
   // Wu et al. 1999 (SSSAJ 63:788): the approach scales with dtheta lambda / Ks.
@@ -35,14 +37,16 @@ TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolu
     end = std::min(end, std::max(kLongest, setup.duration));
     on.duration = end;
     on.times = times_up_to(end);
-    const solver::TestRun run = solver::run_test(on, resolution, table);
+    const solver::TestRun run = solver::run_test(
+        on, resolution, table, [&](double) { return !keep_going || keep_going(); });
+    if (run.interrupted) return std::nullopt;
     double last = 0.0;
     for (std::size_t i = 1; i < run.samples.size(); ++i) {
       const auto &a = run.samples[i - 1], &b = run.samples[i];
       const double flow = (b.ring_volume - a.ring_volume) / (b.time - a.time);
       if (std::abs(flow / steady_flow - 1.0) > kWithin) last = b.time;
     }
-    if (last < end / 2 || end >= kLongest) return {last, last > 0.99 * end};
+    if (last < end / 2 || end >= kLongest) return TimeToSteady{last, last > 0.99 * end};
   }
 }
 

@@ -1,5 +1,7 @@
 #pragma once
+#include <functional>
 #include <memory>
+#include <optional>
 
 #include "postprocess/reading/answer.hpp"
 #include "solver/flow/curve_table.hpp"
@@ -10,7 +12,10 @@ namespace ringwright::postprocess {
 /// The last time at which the flow is more than 5 % from the steady flow, from above or below,
 /// found by running on in a domain of its own for up to 1000 h.
 /// @param resolution of the run on and of the steady flow it is held against
-TimeToSteady time_to_steady(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                            std::shared_ptr<const solver::CurveTable> table);
+/// @param keep_going asked after each step @return none when it said no
+std::optional<TimeToSteady> time_to_steady(const solver::TestSetup& setup,
+                                           const solver::Resolution& resolution,
+                                           std::shared_ptr<const solver::CurveTable> table,
+                                           const std::function<bool()>& keep_going = {});
 
 }  // namespace ringwright::postprocess

@@ -122,7 +122,7 @@ nlohmann::json to_json(const Answer& answer) {
           {"wetted_depth", figure(answer.wetted_depth, "m")},
           {"wetted_beyond_wall", figure(answer.wetted_beyond_wall, "m")},
           {"initial_water_content", quantity(answer.initial_water_content, "1")},
-          {"initial_saturation", quantity(answer.initial_saturation, "1")},
+          {"initial_effective_saturation", quantity(answer.initial_saturation, "1")},
           {"own_capillary_length", quantity(answer.own_capillary_length, "m")},
           {"numerics", numerics_json(answer)},
           {"interrupted", answer.interrupted}};

@@ -92,7 +92,7 @@ void put_soil(hid_t group, const Answer& answer) {
                {"1", "viscosity at test temperature over that at 20 degC"});
   write_scalar(group, "initial_water_content", answer.initial_water_content,
                {"1", "initial volumetric water content"});
-  write_scalar(group, "initial_saturation", answer.initial_saturation,
+  write_scalar(group, "initial_effective_saturation", answer.initial_saturation,
                {"1", "initial effective saturation"});
   write_scalar(group, "own_capillary_length", answer.own_capillary_length,
                {"m", "capillary length of the soil"});

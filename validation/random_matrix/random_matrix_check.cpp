@@ -115,5 +115,6 @@ TEST_CASE("random matrix: the error printed is honest and not too cautious", "[m
     judge(random_case(10000 + i, models::published_soils()), 0.001, tally);
   print("honesty", tally);
   CHECK(tally.within >= 95);
+  CHECK(tally.met == tally.cases);
   CHECK(median(tally.estimates) <= 5 * median(tally.actual));
 }

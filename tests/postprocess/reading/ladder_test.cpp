@@ -162,18 +162,3 @@ TEST_CASE("the worst figure is the worst of those promised", "[reading]") {
     CHECK(make_ladder(q, runs, stop).worst.relative_error > 0.0095);
   }
 }
-
-TEST_CASE("the soil's own capillary length", "[reading]") {
-  // Gardner: 1/alpha, whatever the start
-  const solver::CurveTable gardner(solver::gardner_soil(5.0).curves);
-  CHECK(own_capillary_length(gardner, -0.1) == Approx(0.2).epsilon(1e-5));
-  CHECK(own_capillary_length(gardner, -3.0) == Approx(0.2).epsilon(1e-5));
-  // by quadrature of the curves themselves (White & Sully 1987, Water Resour. Res. 23:1514)
-  for (const char* texture : {"sand", "loam", "silty clay"}) {
-    const models::Soil soil = solver::class_soil(texture);
-    const solver::CurveTable table(soil.curves);
-    for (double h : {-0.3, -3.0, -30.0})
-      CHECK(own_capillary_length(table, h) ==
-            Approx(models::capillary_length(*soil.curves, h)).epsilon(1e-5));
-  }
-}
