@@ -75,7 +75,9 @@ std::string comparison(const Case& what, const AnsweredTest& answered) {
   for (std::size_t i = answered.answers.size(); i < variants.size(); ++i) {
     text += fmt::format(" By {}: not computed.", variants[i].source);
   }
-  if (answered.answers.size() < 2) return text;
+  const auto known = std::count_if(answered.answers.begin(), answered.answers.end(),
+                                   [](const Answer& a) { return stop_of(a) != nullptr; });
+  if (known < 2) return text;
   return text +
          fmt::format(" Across the {} published tables the rate reads x {}, the formula x {}.",
                      answered.answers.size() == 2 ? "two" : std::to_string(answered.answers.size()),

@@ -72,7 +72,8 @@ double rate_ratio(const AnsweredTest& answered) {
 // The wetted depth is not among the figures promised to the accuracy asked for.
 std::string wetted_error_words(const Answer& answer) {
   if (!(answer.wetted_depth.error > 0.0)) return "";
-  return fmt::format(" (wetted depth: {})", about_cm(answer.wetted_depth.error));
+  return fmt::format(" (wetted: {} down, {} beside)", about_cm(answer.wetted_depth.error),
+                     about_cm(answer.wetted_beyond_wall.error));
 }
 
 std::string numerical_words(const Case& what, const AnsweredTest& answered) {
@@ -87,6 +88,18 @@ std::string numerical_words(const Case& what, const AnsweredTest& answered) {
   if (met) return fmt::format("numerical error at most {}, {}.", error, balance);
   return fmt::format("the accuracy asked for, {}, is NOT MET: numerical error {}, {}.",
                      given_percent(what.accuracy), error, balance);
+}
+
+bool of_another_test(const Assumption& assumption, const Test& test) {
+  return assumption.key.starts_with("tests.") &&
+         !assumption.key.starts_with("tests." + test.name + ".");
+}
+
+// How many readings of the soil have figures at their stop.
+std::size_t known(const AnsweredTest& answered) {
+  return static_cast<std::size_t>(
+      std::count_if(answered.answers.begin(), answered.answers.end(),
+                    [](const Answer& answer) { return stop_of(answer) != nullptr; }));
 }
 
 }  // namespace
@@ -117,6 +130,7 @@ std::string assumed_block(const Case& what, const AnsweredTest& answered) {
   if (what.assumed.empty()) return text;
   std::string list;
   for (const Assumption& assumption : what.assumed) {
+    if (of_another_test(assumption, answered.test)) continue;
     if (!list.empty()) list += "; ";
     list += assumption.text;
   }
@@ -125,7 +139,7 @@ std::string assumed_block(const Case& what, const AnsweredTest& answered) {
 
 std::string doubt_lines(const Case& what, const AnsweredTest& answered) {
   std::string soil = "Doubt about soil and site, not in these figures, far exceeds the arithmetic";
-  if (answered.answers.size() > 1) {
+  if (known(answered) > 1) {
     soil = fmt::format(
         "Doubt about soil and site far exceeds the arithmetic: the tables alone differ x {} in the "
         "rate",

@@ -59,6 +59,15 @@ TEST_CASE("the demo case reads in full") {
   CHECK(test.protocol.stop->within == Approx(0.05));
 }
 
+TEST_CASE("the wall of a ring on the surface counts and is assumed when not given") {
+  const std::string on_surface = "tests:\n  one head: { ring: 30 cm, insert: 0 cm, head: 5 cm";
+  const std::string ground = head + "ground:\n  texture: silt loam\n";
+  CHECK(assumes(read_case(ground + on_surface + " }\n", "x.yaml"), "tests.one head.wall",
+                "wall 3 mm"));
+  const Case given = read_case(ground + on_surface + ", wall: 8 mm }\n", "x.yaml");
+  CHECK(given.tests[0].ring.wall == Approx(0.008));
+}
+
 TEST_CASE("what is not given is assumed and listed") {
   const Case result = read_case(head + "ground:\n  texture: silt loam\n" + tests, "x.yaml");
   CHECK(result.accuracy == Approx(0.01));

@@ -51,7 +51,7 @@ one head: 30 cm ring, 10 cm into silt loam (moist), 5 cm constant head, water 10
     length 11.2 cm.
   Assumed, change if wrong: water 10 degC; ruler 1 mm.
   Doubt about soil and site, not in these figures, far exceeds the arithmetic; numerical error
-    at most 0.4 % (wetted depth: 0.40 cm), water balance 2e-08.
+    at most 0.4 % (wetted: 0.40 cm down, 0.20 cm beside), water balance 2e-08.
   Prediction, not a measurement. Cracks, roots, swelling, clogging and leaks along the wall are
     not in it. The local code and the licensed professional decide.
   Files  out: record.csv answer.json
@@ -79,7 +79,8 @@ TEST_CASE("a class name shows both tables, each by its name", "[screen]") {
   CHECK_THAT(screen, Contains("    silt loam by Second et al. 1902: suction 300 cm, 25 % water"));
   CHECK_THAT(screen, Contains(R"(
   Doubt about soil and site far exceeds the arithmetic: the tables alone differ x 1.62 in the
-    rate; numerical error at most 0.4 % (wetted depth: 0.40 cm), water balance 2e-08.
+    rate; numerical error at most 0.4 % (wetted: 0.40 cm down, 0.20 cm beside), water balance
+    2e-08.
 )"));
 }
 
@@ -106,8 +107,8 @@ TEST_CASE("an accuracy that is not met is said with its figure", "[screen]") {
   simulation.tests[0].answers[0].accuracy_met = false;
   simulation.tests[0].answers[0].worst_relative_error = 0.023;
   CHECK_THAT(screen_of(simulation), Contains(R"(far exceeds the arithmetic; the accuracy
-    asked for, 1 %, is NOT MET: numerical error 2.3 % (wetted depth: 0.40 cm), water balance
-    2e-08.)"));
+    asked for, 1 %, is NOT MET: numerical error 2.3 % (wetted: 0.40 cm down, 0.20 cm beside),
+    water balance 2e-08.)"));
 }
 
 TEST_CASE("the mark of the stop tells why the test ends", "[screen]") {
@@ -162,8 +163,25 @@ TEST_CASE("a test within the formula's published range is not flagged", "[screen
   ring = {0.10, 0.05};  // radius 5 to 10 cm, insertion from 3 cm, a quarter to one radius
   CHECK_THAT(screen_of(simulation), !Contains("published range"));
   ring = {0.10, 0.02};
-  CHECK_THAT(screen_of(simulation),
-             Contains("insertion 2 cm, stated\n    from 3 cm up; insertion over radius 0.2, stated for 0.25 to 1."));
+  CHECK_THAT(screen_of(simulation), Contains("insertion 2 cm, stated\n    from 3 cm up; insertion "
+                                             "over radius 0.2, stated for 0.25 to 1."));
+}
+
+TEST_CASE("what was assumed for another test is not listed", "[screen]") {
+  auto simulation = test::simulation_of(1);
+  simulation.what.assumed.push_back({"tests.another.read", "ruler 7 mm"});
+  const std::string screen = screen_of(simulation);
+  CHECK_THAT(screen, Contains("ruler 1 mm"));
+  CHECK_THAT(screen, !Contains("ruler 7 mm"));
+}
+
+TEST_CASE("a second table without figures is not compared", "[screen]") {
+  auto simulation = test::simulation_of(2);
+  simulation.tests[0].answers[1].ladder.clear();
+  simulation.tests[0].answers[1].interrupted = true;
+  const std::string screen = screen_of(simulation);
+  CHECK_THAT(screen, !Contains("Across the two"));
+  CHECK_THAT(screen, !Contains("the tables alone differ"));
 }
 
 TEST_CASE("no line of the screen is wider than a page", "[screen]") {

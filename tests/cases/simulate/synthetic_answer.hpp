@@ -70,7 +70,7 @@ inline postprocess::Answer first_answer() {
   answer.time_to_steady = {7.5 * 3600.0, false};
   answer.peak_flow = 0.9 * litre / 60.0;
   answer.wetted_depth = {0.30, 0.004};
-  answer.wetted_beyond_wall.value = 0.072;
+  answer.wetted_beyond_wall = {0.072, 0.002};
   return answer;
 }
 
