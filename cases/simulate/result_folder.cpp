@@ -3,10 +3,12 @@
 #include <algorithm>
 #include <boost/version.hpp>
 #include <cctype>
+#include <set>
 #include <system_error>
 
 #include "cases/simulate/first_screen.hpp"
 #include "cases/simulate/ladder_csv.hpp"
+#include "cases/simulate/older_results.hpp"
 #include "cases/simulate/resolved_case.hpp"
 #include "cases/simulate/version.hpp"
 #include "postprocess/results/atomic_file.hpp"
@@ -124,6 +126,9 @@ std::vector<std::vector<fs::path>> write_result_folder(const fs::path& folder,
     auto& first = files.front();
     for (std::size_t i = common.size(); i-- > 0;) first.insert(first.begin(), common[i].first);
   }
+  std::set<fs::path> written;
+  for (const auto& paths : files) written.insert(paths.begin(), paths.end());
+  remove_older_results(folder, written);
   return files;
 }
 

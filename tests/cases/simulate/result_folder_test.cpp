@@ -66,4 +66,19 @@ TEST_CASE("the version is that of the build description", "[files]") {
              Contains("project(ringwright VERSION " + std::string(cases::program_version) + " "));
 }
 
+TEST_CASE("a folder used again holds the results of the last run only", "[files]") {
+  namespace fs = std::filesystem;
+  const fs::path folder = fs::temp_directory_path() / "ringwright_used_again";
+  fs::remove_all(folder);
+  cases::write_result_folder(folder, test::simulation_of(2));
+  std::ofstream(folder / "first-table-1901" / "notes.txt") << "mine";
+  REQUIRE(fs::exists(folder / "second-et-al-1902" / "fields.h5"));
+  cases::write_result_folder(folder, test::simulation_of(1));
+  CHECK(fs::exists(folder / "fields.h5"));
+  CHECK_FALSE(fs::exists(folder / "second-et-al-1902"));
+  CHECK_FALSE(fs::exists(folder / "first-table-1901" / "fields.h5"));
+  CHECK(content_of(folder / "first-table-1901" / "notes.txt") == "mine");
+  fs::remove_all(folder);
+}
+
 }  // namespace
