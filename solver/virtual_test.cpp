@@ -16,6 +16,7 @@ namespace ringwright::solver {
 namespace {
 
 constexpr double kMovedAtEdge = 1e-3;  // of dtheta, at the outer faces of the domain
+constexpr double kFartherIn = 1.5;
 constexpr int kMostEnlargements = 4;
 constexpr double kWettedShare = 0.05;  // of dtheta, defines the wetted body
 
@@ -178,7 +179,11 @@ bool Attempt::domain_was_large_enough() const {
   const std::size_t rows = u.size() / columns;
   const double first = content(flow_.table().u_of_head(setup_.initial_head));
   const double limit = kMovedAtEdge * (flow_.fillable() - first);
-  const std::size_t back = std::min<std::size_t>(3, columns - 1);
+  // compared with a column a fair share farther in, however wide the outer cells are
+  std::size_t back = 1;
+  const auto radius = [&](std::size_t column) { return mesh_.drawing.centres[column][0]; };
+  while (back + 1 < columns && radius(columns - 1 - back) > radius(columns - 1) / kFartherIn)
+    ++back;
   for (std::size_t j = 0; j < rows; ++j) {
     const std::size_t last = j * columns + columns - 1;
     if (std::abs(content(u[last]) - content(u[last - back])) > limit) return false;
