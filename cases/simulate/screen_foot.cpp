@@ -35,9 +35,14 @@ std::string ground_as_run(const SoilVariant& variant, const Answer& answer) {
   const models::Soil& soil = answer.question.setup.soil;
   const double head = answer.question.setup.initial_head;
   const double content = soil.water_content(head);
-  std::string text = fmt::format("{} by {}: suction {} cm, {:.0f} % water, {:.0f} % full",
-                                 variant.label, variant.source, rounded(-100.0 * head),
-                                 100.0 * content, 100.0 * content / soil.theta_s);
+  // A soil known by its fillable porosity alone has no water content worth telling.
+  const std::string moisture =
+      content < 0.005 * soil.theta_s
+          ? fmt::format("{:.0f} % still to fill", 100.0 * (soil.theta_s - content))
+          : fmt::format("{:.0f} % water, {:.0f} % full", 100.0 * content,
+                        100.0 * content / soil.theta_s);
+  std::string text = fmt::format("{} by {}: suction {} cm, {}", variant.label, variant.source,
+                                 rounded(-100.0 * head), moisture);
   if (!(answer.own_capillary_length > 0.0)) return text;
   return text + fmt::format("; capillary length {}{}", about_cm(answer.own_capillary_length),
                             height_words(soil));
