@@ -103,11 +103,12 @@ std::string check_text(const Case& what) {
   text += "\n" + assumed_lines(what);
   const double duration = rough_duration(what);
   const std::string time = duration < 1.0 ? "less than a second" : "about " + about_time(duration);
-  return text +
-         fmt::format(
-             "\nAccuracy asked for: {}. Computing takes roughly: {}; several times that where "
-             "a sharp front creeps, in fine dry soil under a wide ring.\n",
-             given_percent(what.accuracy), time);
+  return text + "\n" +
+         paragraph(fmt::format("Accuracy asked for: {}. Computing takes roughly: {}; several times "
+                               "that where a sharp front creeps, in fine dry soil under a wide "
+                               "ring.",
+                               given_percent(what.accuracy), time),
+                   "", "  ");
 }
 
 }  // namespace ringwright::cases
