@@ -20,6 +20,24 @@ std::vector<double> times_up_to(double end) {
   return times;
 }
 
+// Last time the mean flow between samples is more than kWithin from steady, between the middles of
+// the intervals; the end of the last sample when it still is there; 0 when it never is.
+double last_crossing(const std::vector<solver::Sample>& samples, double steady_flow) {
+  double last = 0.0, middle_before = 0.0, off_before = 0.0;
+  for (std::size_t i = 1; i < samples.size(); ++i) {
+    const solver::Sample &a = samples[i - 1], &b = samples[i];
+    const double flow = (b.ring_volume - a.ring_volume) / (b.time - a.time);
+    const double off = std::abs(flow / steady_flow - 1.0), middle = 0.5 * (a.time + b.time);
+    if (off > kWithin)
+      last = b.time;
+    else if (off_before > kWithin)
+      last = middle_before + (off_before - kWithin) / (off_before - off) * (middle - middle_before);
+    middle_before = middle;
+    off_before = off;
+  }
+  return last;
+}
+
 }  // namespace
 
 std::optional<TimeToSteady> time_to_steady(const solver::TestSetup& setup,
@@ -40,12 +58,7 @@ std::optional<TimeToSteady> time_to_steady(const solver::TestSetup& setup,
     const solver::TestRun run = solver::run_test(
         on, resolution, table, [&](double) { return !keep_going || keep_going(); });
     if (run.interrupted) return std::nullopt;
-    double last = 0.0;
-    for (std::size_t i = 1; i < run.samples.size(); ++i) {
-      const auto &a = run.samples[i - 1], &b = run.samples[i];
-      const double flow = (b.ring_volume - a.ring_volume) / (b.time - a.time);
-      if (std::abs(flow / steady_flow - 1.0) > kWithin) last = b.time;
-    }
+    const double last = last_crossing(run.samples, steady_flow);
     if (last < end / 2 || end >= kLongest) return TimeToSteady{last, last > 0.99 * end};
   }
 }
