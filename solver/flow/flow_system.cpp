@@ -28,6 +28,9 @@ FlowSystem::FlowSystem(const CellsAndFaces& mesh, const models::Soil& soil,
       patch_outflow_(mesh.patches.size()) {
   if (conditions_.size() != mesh.patches.size())
     throw std::invalid_argument("one condition per boundary patch is needed");
+  if (std::any_of(mesh.soil.begin(), mesh.soil.end(),
+                  [&](int index) { return index != mesh.soil.front(); }))
+    throw std::invalid_argument("the flow takes one material, the mesh holds several");
   const double lambda = table_->capillary_length();
   for (const Face& f : mesh.faces) {
     const double w = gravity_weight(f.rise, lambda);

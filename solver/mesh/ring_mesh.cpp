@@ -1,6 +1,7 @@
 #include "solver/mesh/ring_mesh.hpp"
 
 #include <algorithm>
+#include <stdexcept>
 
 #include "solver/mesh/axisymmetric.hpp"
 #include "solver/mesh/grading.hpp"
@@ -32,6 +33,8 @@ CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
   const double a = ring.radius, d = ring.insertion;
   const double tip = resolution.tip_cell, growth = resolution.growth;
   const bool on_surface = d <= 0.0;
+  if (on_surface && !(ring.wall > 0.0))
+    throw std::invalid_argument("a ring on the surface needs a wall thicker than 0");
   std::vector<double> radii = graded_one_end(a, 0.0, tip, growth), elevations;
   std::reverse(radii.begin(), radii.end());
   radii.front() = 0.0;

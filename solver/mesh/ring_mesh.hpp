@@ -10,6 +10,7 @@ namespace ringwright::solver {
 
 /// Patches: "ring", "outside", "bottom", "side", and "wall", the strip under a ring that stands
 /// on the surface.
+/// @throws std::invalid_argument for a ring on the surface whose wall has no thickness
 CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
                         const Resolution& resolution);
 

@@ -69,7 +69,6 @@ void judge(const RandomCase& c, double fine, Tally& tally) {
     else
       std::cout << fmt::format("{}: true {:.3f} %, estimated {:.3f} % at worst\n", c.name,
                                100 * tally.actual.back(), 100 * tally.estimates.back());
-    CHECK(a.accuracy_met == (a.worst_relative_error <= 0.01));
   } catch (const std::exception& failure) {
     CAPTURE(c.name);
     FAIL_CHECK(failure.what());

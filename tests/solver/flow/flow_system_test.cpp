@@ -262,4 +262,8 @@ TEST_CASE("one condition per patch is asked for", "[solver][flow]") {
   const models::Soil soil = gardner_soil(5.0);
   const auto table = std::make_shared<CurveTable>(soil.curves);
   CHECK_THROWS_AS(FlowSystem(small_ring(), soil, table, {{}, {}}), std::invalid_argument);
+  CellsAndFaces layered = small_ring();
+  layered.soil.back() = 1;  // across two materials the Kirchhoff difference would be wrong
+  CHECK_THROWS_AS(FlowSystem(layered, soil, table, std::vector<Condition>(layered.patches.size())),
+                  std::invalid_argument);
 }

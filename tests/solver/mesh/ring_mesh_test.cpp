@@ -68,6 +68,7 @@ TEST_CASE("a ring on the surface covers a closed strip of its wall's thickness",
   const CellsAndFaces mesh = ring_mesh(ring, kGround, fine);
   CHECK(surface(mesh, "wall") ==
         Approx(std::numbers::pi * (0.154 * 0.154 - 0.15 * 0.15)).epsilon(1e-9));
+  CHECK_THROWS_AS(ring_mesh({0.15, 0.0, 0.0}, kGround, fine), std::invalid_argument);
   const CellsAndFaces driven = ring_mesh({0.15, 0.05, 0.004}, kGround, fine);
   CHECK(std::count(driven.patches.begin(), driven.patches.end(), "wall") == 0);
 }
