@@ -4,8 +4,11 @@
 #include <atomic>
 #include <functional>
 #include <memory>
+#include <optional>
 #include <vector>
 
+#include "models/ground/layer.hpp"
+#include "models/protocol/pond_program.hpp"
 #include "models/ring/single_ring.hpp"
 #include "models/soil/curves.hpp"
 #include "solver/mesh/cells_and_faces.hpp"
@@ -14,15 +17,30 @@ namespace ringwright::solver {
 
 class CurveTable;
 
-/// The physical question.
+/// The physical question. The first fields make the simplest test, a single ring at a constant head
+/// on uniform ground; what follows `more` is left empty for it.
 struct TestSetup {
-  models::Soil soil;
-  double initial_head = 0.0;  ///< uniform pressure head before the test [m], < 0
-  models::SingleRing ring;
-  double pond_head = 0.0;         ///< constant head in the ring from t = 0 [m], >= 0
-  double duration = 0.0;          ///< [s]
-  std::vector<double> times;      ///< where samples are wanted [s], ascending, within (0, duration]
+  models::Soil soil;          ///< from the surface down
+  double initial_head = 0.0;  ///< pressure head before the test [m], < 0
+  models::SingleRing ring;    ///< of a double ring the inner one
+  double pond_head = 0.0;     ///< head in the ring from t = 0 [m], >= 0, where it has no program
+  double duration = 0.0;      ///< [s]
+  std::vector<double> times;  ///< where samples are wanted [s], ascending, within (0, duration]
   std::vector<double> snapshots;  ///< where fields are wanted [s], ascending; may be empty
+
+  // more rings and what is done in them
+  std::optional<models::SingleRing> outer_ring = std::nullopt;
+  models::PondProgram program = {};        ///< of the ring; no stages: `pond_head` held
+  models::PondProgram outer_program = {};  ///< of the outer ring; no stages: `pond_head` held
+
+  // more ground
+  std::vector<models::Layer> layers_below = {};         ///< ascending; their tops below the surface
+  std::optional<double> water_table = std::nullopt;     ///< depth [m]; the ground is hydrostatic
+                                                        ///< to it and stays so far outside
+  std::optional<double> hydrostatic_to = std::nullopt;  ///< depth of a table that only shapes the
+                                                        ///< state before the test [m]
+  std::optional<models::DisturbedSoil> disturbed = std::nullopt;
+  std::optional<models::WallGap> gap = std::nullopt;
 };
 
 /// How finely it is answered. Made by resolution_for() (solver/resolution.hpp); a case file has no
@@ -51,16 +69,56 @@ struct Wetted {
   double beyond_wall = 0.0;  ///< horizontally outside the wall [m]
 };
 
+/// The water of one ring at one time; volumes since the start.
+///   supply = soil + standing + evaporated + removed
+struct RingWater {
+  double head = 0.0;        ///< at the soil surface [m]; below 0: no water stands
+  double soil = 0.0;        ///< into the ground [m3]
+  double soil_flow = 0.0;   ///< [m3/s]
+  double standing = 0.0;    ///< in ring and vessel [m3]
+  double supply = 0.0;      ///< given by the tank [m3]
+  double evaporated = 0.0;  ///< [m3]
+  double removed = 0.0;     ///< bailed, bled or spilt [m3]
+};
+
 /// State of the totals at one time; volumes since the start, all for the full circle.
 struct Sample {
   double time = 0.0;         ///< [s]
-  double ring_volume = 0.0;  ///< into the soil through the ring's surface [m3]
+  double ring_volume = 0.0;  ///< into the soil through the (inner) ring's surface [m3]
   double ring_flow = 0.0;    ///< [m3/s]
   double drainage_volume =
       0.0;  ///< out of the bottom, drainage of the initial profile included [m3]
   double seepage_volume = 0.0;  ///< out of the surface outside the ring [m3]
   double stored_volume = 0.0;   ///< change of the water stored in the soil [m3]
   Wetted wetted;                ///< ground wetted so far
+  RingWater water = {};         ///< of the (inner) ring
+  RingWater outer_water = {};   ///< of the annulus of a double ring
+};
+
+enum class EventKind {
+  head_reached,       ///< a limited supply has brought the water to the head set
+  head_lost,          ///< the soil drinks more than the supply gives: the head begins to sag
+  emptied,            ///< no water stands in the ring any more
+  refilled,           ///< filled up again at the threshold of a falling head
+  reservoir_empty,    ///< value: volume it gave [m3]
+  reservoir_brought,  ///< the next full reservoir is there
+  surfaced,           ///< water wells up outside; value: radius [m]
+  test_ended          ///< before its time, since the reservoir is empty
+};
+
+struct Event {
+  double time = 0.0;  ///< [s]
+  EventKind kind = EventKind::emptied;
+  bool outer = false;  ///< in the outer ring
+  double value = 0.0;
+};
+
+/// Water welling up at the surface outside the rings.
+struct Surfacing {
+  bool happened = false;
+  double first_time = 0.0;  ///< [s]
+  double farthest = 0.0;    ///< largest radius at which water came out [m]
+  double volume = 0.0;      ///< [m3]
 };
 
 struct Snapshot {
@@ -80,6 +138,9 @@ struct RunStatistics {
 struct TestRun {
   std::vector<Sample> samples;  ///< one per wanted time (fewer if interrupted)
   std::vector<Snapshot> snapshots;
+  std::vector<Event> events = {};  ///< in the order they came
+  Surfacing surfacing = {};
+  double ended = 0.0;  ///< time reached [s]; before the duration if the protocol says so
   Drawing drawing;
   RunStatistics statistics;
   bool interrupted = false;

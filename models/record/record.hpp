@@ -10,15 +10,15 @@
 namespace ringwright::models {
 
 struct Reading {
-  double time = 0.0;            ///< end of the interval, from the start of ponding [s]
-  double interval = 0.0;        ///< [s]
-  double volume = 0.0;          ///< into the soil in the interval [m3]
-  double total_volume = 0.0;    ///< into the soil since the start [m3]
-  double head = 0.0;            ///< pond depth at the reading [m]
+  double time = 0.0;          ///< end of the interval, from the start of ponding [s]
+  double interval = 0.0;      ///< [s]
+  double volume = 0.0;        ///< into the soil in the interval [m3]
+  double total_volume = 0.0;  ///< into the soil since the start [m3]
+  double head = 0.0;          ///< pond depth at the reading [m]
 };
 
 struct Record {
-  double ring_area = 0.0;       ///< [m2]
+  double ring_area = 0.0;  ///< [m2]
   std::vector<Reading> readings;
 
   /// Mean infiltration rate over the interval of reading i [m/s].

@@ -56,10 +56,11 @@ class Curves {
 /// A soil material: curves and their scale factors.
 struct Soil {
   std::shared_ptr<const Curves> curves;
-  double theta_r = 0.0;            ///< residual water content [-]
-  double theta_s = 0.0;            ///< saturated water content [-]
-  double Ks = 0.0;                 ///< saturated conductivity at the temperature of the run [m/s]
-  double specific_storage = 0.0;   ///< Ss [1/m], acts for h > 0 only
+  double theta_r = 0.0;           ///< residual water content [-]
+  double theta_s = 0.0;           ///< saturated water content [-]
+  double Ks = 0.0;                ///< saturated conductivity at the temperature of the run [m/s]
+  double specific_storage = 0.0;  ///< Ss [1/m], acts for h > 0 only
+  double anisotropy = 1.0;        ///< horizontal over vertical conductivity, at every h [-]
 
   double water_content(double h) const {
     return theta_r + (theta_s - theta_r) * curves->saturation(h);

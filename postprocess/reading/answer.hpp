@@ -6,6 +6,8 @@
 #include <string>
 #include <vector>
 
+#include "models/protocol/stop_rule.hpp"
+#include "models/record/gauge.hpp"
 #include "models/record/record.hpp"
 #include "solver/virtual_test.hpp"
 
@@ -39,6 +41,74 @@ struct ReadsX {
   Figure one_head;             ///< Reynolds & Elrick 1990, assumed alpha*
   Figure one_head_own_lambda;  ///< the same with the soil's own capillary length: not available to
                                ///< a crew
+};
+
+/// One stage of a test with several, as the crew reads it at its end.
+struct StageReading {
+  std::size_t stage = 0;                  ///< index into the program
+  double from = 0.0, to = 0.0;            ///< [s]
+  double head_from = 0.0, head_to = 0.0;  ///< true head at the ends [m]
+  Figure rate;         ///< mean over the last reading interval of the stage [m/s]; of a falling
+                       ///< head too: into the ground, by the drop of the level
+  Figure soil_volume;  ///< into the ground in this stage [m3]
+  Figure steady_rate;  ///< at the head of a constant stage [m/s]; value 0 for a falling one
+  bool soak = false;
+};
+
+/// Two stages at different heads read together (two-ponding-depth formula).
+struct HeadPair {
+  std::size_t first = 0, second = 0;  ///< indices into the stage readings
+  Figure kfs;                         ///< [m/s], test temperature; of the true record
+  Figure reads;                       ///< kfs over true Kfs [-]
+  double kfs_as_read = 0.0;           ///< from the record as read [m/s]
+  bool physical = true;               ///< Kfs and matric flux potential above 0
+};
+
+/// Where the water of one ring went until the stop.
+struct WaterUse {
+  Figure soil;              ///< [m3]
+  Figure supply;            ///< [m3]
+  double standing = 0.0;    ///< [m3]
+  double evaporated = 0.0;  ///< [m3]
+  double removed = 0.0;     ///< bailed, bled or spilt [m3]
+  double peak_flow = 0.0;   ///< largest mean over 60 s of what the supply gives [m3/s]
+};
+
+enum class FlagKind {
+  supply_exceeded,     ///< value: head lost [m]; limit: head set [m]
+  reservoir_emptied,   ///< value: time [s]; limit: its volume [m3]
+  flow_below_gauge,    ///< value: divisions of the gauge per reading at the stop; limit: least
+  surfacing,           ///< value: litres welling up outside [m3]; limit: first time [s]
+  piping,              ///< value: H/(2d) [-]; limit
+  fracture,            ///< value: water pressure at the foot over the soil's weight there [-]
+  evaporation_share,   ///< value: evaporation over inflow at the stop [-]; limit
+  stop_rule_not_met,   ///< value: rate over steady rate minus 1 [-]
+  domain_reached,      ///< the mesh could not be made large enough
+  insertion_share,     ///< value: insertion over the liner's thickness [-]; limit
+  sealed_temperature,  ///< value: volume per degC [m3]; limit: daily flow [m3]
+  lid_lift,            ///< value: lift [N]; limit: weight of lid and ring [N]
+  lid_not_for_use      ///< a lidded test without stated relief and rating
+};
+
+/// Something the crew must know. Words and cure: cases/simulate.
+struct Flag {
+  FlagKind kind = FlagKind::stop_rule_not_met;
+  double value = 0.0, limit = 0.0;
+};
+
+/// What one stop rule would do.
+struct RuleVerdict {
+  models::StopRule rule;
+  std::optional<double> stop;  ///< [s]; none: not met
+  Figure rate;                 ///< as truly was, at that stop [m/s]
+  Figure above_steady;         ///< true rate at that moment over steady, minus 1 [-]
+  Figure supply_volume;        ///< [m3]
+};
+
+/// Depth below which doubling K moves the rate at the stop by less than 5 %.
+struct DepthOfInfluence {
+  double depth = 0.0;  ///< [m]
+  bool known = false;
 };
 
 struct LadderRow {

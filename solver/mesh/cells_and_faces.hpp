@@ -3,7 +3,9 @@
 ///
 /// A cell has a volume, the elevation of its centre and a soil index. An inner face
 /// joins two cells through a transmissibility (area over distance of the centres, with
-/// any correction for a singularity already in it). A boundary face belongs to one cell
+/// any correction for a singularity already in it); where the two cells are of different
+/// soils the flow equation needs to know how much of the resistance lies on either side.
+/// A face without rise carries horizontal flow. A boundary face belongs to one cell
 /// and to a named patch. A ring wall is the absence of faces: cells on its two sides
 /// simply are not joined. The same arrays describe a column, an axisymmetric section
 /// (true volumes and areas of the full circle) and a 3-D body, and the flow code cannot
@@ -21,6 +23,7 @@ struct Face {
   int a = 0, b = 0;             ///< the two cells; flow is counted positive from a to b
   double transmissibility = 0;  ///< [m]: area [m2] over distance [m]
   double rise = 0;              ///< elevation of a minus elevation of b [m]
+  double part_a = 0.5;          ///< part of the resistance, and of the rise, on the side of a [-]
 };
 
 struct BoundaryFace {
