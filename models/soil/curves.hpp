@@ -38,7 +38,8 @@ class Curves {
 
   /// Head at and above which the soil is saturated [m], <= 0.
   virtual double entry_head() const = 0;
-  /// Head where dSe/dh is largest [m]; the entry head for curves without a maximum below it.
+  /// Head where dSe/dh is largest [m]; the entry head for curves without a maximum below it. Of
+  /// several maxima it may be a lower one, if saturation fixes the head better below that.
   /// The solver changes its unknown from h (wetter) to Se (drier) here.
   virtual double steepest_head() const = 0;
   /// Head h [m] at which the saturation is Se, 0 < Se <= 1; the entry head for Se = 1.

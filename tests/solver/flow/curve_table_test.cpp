@@ -8,6 +8,7 @@
 
 #include "models/soil/brooks_corey.hpp"
 #include "models/soil/catalogue.hpp"
+#include "models/soil/durner.hpp"
 #include "models/soil/gardner.hpp"
 
 using namespace ringwright;
@@ -174,6 +175,44 @@ TEST_CASE("curve tables: the driest state lies beyond every head", "[solver][flo
       CHECK(p.K >= 0.0);
       CHECK(std::isfinite(p.dPhi));
       CHECK(std::isfinite(p.dK));
+    }
+  }
+}
+
+TEST_CASE("curve tables: soils of several pore systems agree with their curves", "[solver][flow]") {
+  using Systems = std::vector<models::PoreSystem>;
+  const std::vector<Systems> soils = {
+      {{0.4, 20.0, 2.1}, {0.6, 0.5, 1.4}},
+      {{0.08, 200.0, 3.0}, {0.92, 3.6, 1.56}},
+      {{0.02, 300.0, 2.0}, {0.98, 1.0, 1.2}},
+      {{0.002, 100.0, 3.0}, {0.998, 1.0, 3.0}},
+      {{0.5, 4.0, 1.8}, {0.5, 3.0, 1.7}},
+      {{0.1, 200.0, 3.0}, {0.6, 3.6, 1.56}, {0.3, 0.4, 1.8}},
+      {{0.05, 500.0, 3.0}, {0.95, 1.0, 2.0}},
+      {{0.02, 100.0, 5.0}, {0.98, 0.5, 3.0}},
+      {{0.2, 100.0, 5.0}, {0.8, 0.2, 5.0}},
+      {{0.3, 10.0, 1.2}, {0.7, 0.5, 1.1}},
+  };
+  for (const Systems& systems : soils) {
+    for (double h_s : {0.0, -0.02}) {
+      const auto curves = std::make_shared<models::Durner>(systems, 0.5, h_s);
+      const CurveTable table(curves);
+      CAPTURE(curves->describe(), table.bins());
+      double worst_K = 0.0, worst_Se = 0.0, worst_Phi = 0.0, worst_head = 0.0;
+      for (double h : random_heads(*curves, 400, 31)) {
+        const double u = table.u_of_head(h);
+        const CurvePoint p = table.at(u);
+        worst_K = std::max(worst_K, std::abs(p.K / curves->relative_conductivity(h) - 1));
+        worst_Se = std::max(worst_Se, std::abs(p.Se / curves->saturation(h) - 1));
+        worst_Phi = std::max(worst_Phi, std::abs(p.Phi / curves->relative_flux_potential(h) - 1));
+        worst_head = std::max(worst_head, std::abs(table.head_of_u(u) / h - 1));
+        CAPTURE(h);
+        CHECK((p.dSe >= 0 && p.dPhi > 0 && p.dK >= 0));
+      }
+      CHECK(worst_K < 1e-5);
+      CHECK(worst_Se < 1e-5);
+      CHECK(worst_Phi < 1e-5);
+      CHECK(worst_head < 1e-6);
     }
   }
 }
