@@ -22,7 +22,7 @@ struct FlagOfCase {
   const char* help;
 };
 
-constexpr std::array<FlagOfCase, 17> case_flags{{
+constexpr std::array<FlagOfCase, 28> case_flags{{
     {"--job", &CaseFlags::job, "Name of the job"},
     {"--soil", &CaseFlags::soil, "\"silt loam, moist\": class, and dry, moist or wet"},
     {"--published", &CaseFlags::published, "One table of class averages instead of all"},
@@ -36,9 +36,20 @@ constexpr std::array<FlagOfCase, 17> case_flags{{
     {"--ring", &CaseFlags::ring, "Inner diameter, \"30 cm\""},
     {"--insert", &CaseFlags::insert, "How deep the wall stands in the ground, \"10 cm\""},
     {"--head", &CaseFlags::head, "Depth of water held in the ring, \"5 cm\""},
+    {"--heads", &CaseFlags::heads, "Instead of --head: \"5 cm then 15 cm, each for 1 h\""},
+    {"--fall", &CaseFlags::fall, "Instead of --head: \"from 20 cm to 5 cm\""},
+    {"--soak", &CaseFlags::soak, "First, not read: \"5 cm for 30 min\""},
+    {"--outer-ring", &CaseFlags::outer_ring, "Inner diameter of an outer ring, \"60 cm\""},
+    {"--outer-insert", &CaseFlags::outer_insert, "As --insert, of the outer ring, \"15 cm\""},
+    {"--outer-head", &CaseFlags::outer_head, "As --head, of the outer ring, \"5 cm\""},
     {"--wall", &CaseFlags::wall, "Thickness of the wall, \"3 mm\""},
     {"--stop", &CaseFlags::stop, "\"after 6 h\" or \"3 readings within 5 %, or 8 h\""},
     {"--read", &CaseFlags::read, "\"every 10 min\""},
+    {"--supply", &CaseFlags::supply, "Largest flow, \"6 L/min\""},
+    {"--reservoir", &CaseFlags::reservoir, "\"200 L\""},
+    {"--gauge", &CaseFlags::gauge, "One division, \"10 mL\" or \"1 mm in a 10 cm tube\""},
+    {"--test-level", &CaseFlags::test_level, "Below ground, \"60 cm\""},
+    {"--water-table", &CaseFlags::water_table, "Below ground, \"2 m\""},
     {"--assumed-alpha-star", &CaseFlags::assumed_alpha_star, "What the crew puts in its formula"},
 }};
 

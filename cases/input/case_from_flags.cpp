@@ -50,14 +50,26 @@ std::vector<Line> lines_of(const CaseFlags& flags) {
   add(lines, "  ", "moisture", "--moisture", flags.moisture);
   add(lines, "  ", "minimum capillary height", "--minimum-capillary-height",
       flags.capillary_height);
+  add(lines, "  ", "test level", "--test-level", flags.test_level);
+  add(lines, "  ", "water table", "--water-table", flags.water_table);
   lines.push_back({"tests:", ""});
-  lines.push_back({"  one head:", ""});
+  const bool one_head = !flags.heads && !flags.fall;
+  lines.push_back({one_head ? "  one head:" : flags.fall ? "  falling head:" : "  heads:", ""});
   add(lines, "    ", "ring", "--ring", flags.ring);
   add(lines, "    ", "insert", "--insert", flags.insert);
   add(lines, "    ", "head", "--head", flags.head);
+  add(lines, "    ", "heads", "--heads", flags.heads);
+  add(lines, "    ", "fall", "--fall", flags.fall);
+  add(lines, "    ", "soak", "--soak", flags.soak);
+  add(lines, "    ", "outer ring", "--outer-ring", flags.outer_ring);
+  add(lines, "    ", "outer insert", "--outer-insert", flags.outer_insert);
+  add(lines, "    ", "outer head", "--outer-head", flags.outer_head);
   add(lines, "    ", "wall", "--wall", flags.wall);
   add(lines, "  ", "stop", "--stop", flags.stop);
   add(lines, "  ", "read", "--read", flags.read);
+  add(lines, "  ", "supply", "--supply", flags.supply);
+  add(lines, "  ", "reservoir", "--reservoir", flags.reservoir);
+  add(lines, "  ", "gauge", "--gauge", flags.gauge);
   add(lines, "  ", "assumed alpha star", "--assumed-alpha-star", flags.assumed_alpha_star);
   return lines;
 }
@@ -85,7 +97,7 @@ void check_needed(const CaseFlags& flags, const Source& source) {
   need(flags.soil || flags.capillary_length || flags.alpha_star, "--soil", "silt loam, moist");
   need(flags.ring.has_value(), "--ring", "30 cm");
   need(flags.insert.has_value(), "--insert", "10 cm");
-  need(flags.head.has_value(), "--head", "5 cm");
+  need(flags.head || flags.heads || flags.fall, "--head", "5 cm");
   if (!problems.empty()) throw CaseErrors(std::move(problems), source);
 }
 

@@ -27,7 +27,18 @@ struct CaseFlags {
   std::optional<std::string> ring;                ///< --ring "30 cm", inner diameter
   std::optional<std::string> insert;              ///< --insert "10 cm"
   std::optional<std::string> head;                ///< --head "5 cm"
+  std::optional<std::string> heads;               ///< --heads "5 cm then 15 cm, each for 1 h"
+  std::optional<std::string> fall;                ///< --fall "from 20 cm to 5 cm"
+  std::optional<std::string> soak;                ///< --soak "5 cm for 30 min"
+  std::optional<std::string> outer_ring;          ///< --outer-ring "60 cm", inner diameter
+  std::optional<std::string> outer_insert;        ///< --outer-insert "15 cm"
+  std::optional<std::string> outer_head;          ///< --outer-head "5 cm"
   std::optional<std::string> wall;                ///< --wall "3 mm"
+  std::optional<std::string> supply;              ///< --supply "6 L/min"
+  std::optional<std::string> reservoir;           ///< --reservoir "200 L"
+  std::optional<std::string> gauge;               ///< --gauge "10 mL"
+  std::optional<std::string> test_level;          ///< --test-level "60 cm"
+  std::optional<std::string> water_table;         ///< --water-table "2 m"
   std::optional<std::string> stop;                ///< --stop "after 6 h"
   std::optional<std::string> read;                ///< --read "every 10 min"
   std::optional<std::string> assumed_alpha_star;  ///< --assumed-alpha-star "0.12 1/cm"

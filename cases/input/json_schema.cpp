@@ -17,7 +17,8 @@ Json section_schema(const std::vector<Key>& keys);
 
 std::string description_of(const Key& key) {
   std::string text = key.meaning;
-  if (key.range && key.kind != ValueKind::phrase) text += " Allowed: " + key.range->words + ".";
+  const bool words = key.kind == ValueKind::phrase || key.kind == ValueKind::phrases;
+  if (key.range && !words) text += " Allowed: " + key.range->words + ".";
   return text;
 }
 
@@ -36,6 +37,18 @@ Json quantity_schema(const Key& key) {
   return {{"anyOf", Json::array({number, percent})}};
 }
 
+Json one_or_more(const Json& item) {
+  const Json list{{"type", "array"}, {"minItems", 1}, {"items", item}};
+  return {{"anyOf", Json::array({item, list})}};
+}
+
+Json sections_schema(const Key& key) {
+  const Json section = section_schema(key.keys);
+  if (key.examples.empty()) return one_or_more(section);
+  const Json phrase{{"type", "string"}, {"minLength", 1}, {"examples", key.examples}};
+  return one_or_more({{"anyOf", Json::array({phrase, section})}});
+}
+
 Json value_schema(const Key& key) {
   switch (key.kind) {
     case ValueKind::version:
@@ -52,6 +65,12 @@ Json value_schema(const Key& key) {
       Json section = section_schema(key.keys);
       if (!key.named.empty()) section["additionalProperties"] = section_schema(key.named);
       return section;
+    }
+    case ValueKind::sections:
+      return sections_schema(key);
+    case ValueKind::phrases: {
+      const Json phrase{{"type", "string"}, {"minLength", 1}};
+      return one_or_more(phrase);
     }
     case ValueKind::number:
       break;
@@ -72,13 +91,22 @@ Json key_schema(const Key& key) {
 
 Json section_schema(const std::vector<Key>& keys) {
   Json properties = Json::object();
-  Json required = Json::array();
+  Json required = Json::array(), alternatives = Json::array();
   for (const Key& key : keys) {
     properties[key.name] = key_schema(key);
-    if (key.required) required.push_back(key.name);
+    if (!key.required) continue;
+    if (key.or_else.empty()) {
+      required.push_back(key.name);
+      continue;
+    }
+    Json any = Json::array({{{"required", Json::array({key.name})}}});
+    for (const std::string& other : key.or_else)
+      any.push_back({{"required", Json::array({other})}});
+    alternatives.push_back({{"anyOf", any}});
   }
   Json schema{{"type", "object"}, {"minProperties", 1}, {"additionalProperties", false}};
   if (!required.empty()) schema["required"] = required;
+  if (!alternatives.empty()) schema["allOf"] = alternatives;
   schema["properties"] = properties;
   return schema;
 }

@@ -37,12 +37,14 @@ void read_file(const LocatedNode& root, Case& result, Reading& reading) {
   } else if (!file.has("accuracy")) {
     reading.assume("accuracy", fmt::format("accuracy {:g} %", 100 * result.accuracy));
   }
+  GroundPlaces places;
   if (const auto* ground = file.section("ground")) {
     result.ground =
-        read_ground(*ground, file.key_place("ground"), *grammar.find("ground"), reading);
+        read_ground(*ground, file.key_place("ground"), *grammar.find("ground"), places, reading);
   }
   if (const auto* tests = file.section("tests")) {
-    result.tests = read_tests(*tests, file.key_place("tests"), *grammar.find("tests"), reading);
+    result.tests = read_tests(*tests, file.key_place("tests"), *grammar.find("tests"),
+                              {result.ground, places}, reading);
   }
 }
 
@@ -62,6 +64,7 @@ Case read_case(const Source& source) {
   }
   if (!reading.problems.empty()) throw CaseErrors(std::move(reading.problems), source);
   result.assumed = std::move(reading.assumed);
+  result.warnings = std::move(reading.warnings);
   return result;
 }
 

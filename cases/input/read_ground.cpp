@@ -2,9 +2,13 @@
 
 #include <fmt/format.h>
 
-#include "cases/input/read_phrases.hpp"
-#include "cases/input/read_soil.hpp"
-#include "models/soil/moisture.hpp"
+#include <algorithm>
+#include <array>
+
+#include "cases/input/read_layer.hpp"
+#include "cases/input/read_layers.hpp"
+#include "cases/input/read_walls.hpp"
+#include "cases/input/read_water_table.hpp"
 
 namespace ringwright::cases {
 namespace {
@@ -18,130 +22,83 @@ void read_water(const SectionReader& section, Ground& ground, Reading& reading) 
   }
 }
 
-// Fills the moisture. @return the key it was given by, empty for the default; none if it is wrong
-std::optional<std::string> read_moisture_of(const SectionReader& section,
-                                            const std::optional<TextureWords>& texture,
-                                            Ground& ground, Reading& reading) {
-  const bool in_texture = texture && texture->moisture;
-  if (in_texture && section.has("moisture")) {
-    reading.contradiction(section.value_place("moisture"),
-                          section.front_of("moisture") + "the moisture is given twice",
-                          section.value_place("texture"), "also given here", "keep one of the two");
-  }
-  std::optional<Moisture> moisture;
-  std::string key = in_texture ? "texture" : "moisture";
-  if (in_texture) {
-    moisture = read_moisture(section, "texture", *texture->moisture, reading);
-  } else if (const auto text = section.text("moisture")) {
-    moisture = read_moisture(section, "moisture", *text, reading);
-  } else if (!section.has("moisture")) {
-    moisture = Moisture{"moist", models::suction_of_word("moist"), {}, {}};
-    key = "";
-  }
-  if (!moisture) return std::nullopt;
-  ground.moisture = *moisture;
-  return key;
+double read_storage(const SectionReader& section, Reading& reading) {
+  if (!section.has("specific storage"))
+    reading.assume(section.path_of("specific storage"), "specific storage 0 1/m");
+  return section.quantity("specific storage").value_or(0.0);
 }
 
-// A content or degree of saturation must lie between theta_r and theta_s of every soil meant.
-void check_moisture(const SectionReader& section, const std::string& moisture_key,
-                    const std::string& soil_key_name, const Ground& ground, Reading& reading) {
-  for (const SoilVariant& variant : ground.variants) {
-    const models::Soil& soil = variant.soil;
-    const Moisture& moisture = ground.moisture;
-    const double content =
-        moisture.water_content.value_or(moisture.saturation.value_or(0.0) * soil.theta_s);
-    const std::string front = section.front_of(moisture_key);
-    const std::string given = fmt::format("water content {:.3g} %", 100 * content);
-    if (content >= soil.theta_s) {
-      reading.contradiction(
-          section.value_place(moisture_key),
-          fmt::format("{}{} is not below saturation, {:.3g} %", front, given, 100 * soil.theta_s),
-          section.key_place(soil_key_name),
-          fmt::format("theta_s of {}, {}", variant.label, variant.source),
-          "give a smaller content, or a suction");
-      return;
-    }
-    if (content <= soil.theta_r || initial_head(moisture, soil) < -1000.0) {
-      reading.contradiction(
-          section.value_place(moisture_key),
-          fmt::format("{}{} is drier than this soil gets; its residual content is {:.3g} %", front,
-                      given, 100 * soil.theta_r),
-          section.key_place(soil_key_name),
-          fmt::format("theta_r of {}, {}", variant.label, variant.source),
-          "give a larger content, or a suction");
-      return;
-    }
-  }
+bool names_a_soil(const SectionReader& section) {
+  constexpr std::array keys{"texture", "parameters", "capillary length", "alpha star"};
+  return std::any_of(keys.begin(), keys.end(), [&](const char* key) {
+    return section.has(key) || section.is_suggested(key);
+  });
 }
 
-// A soil that is saturated before the test has nothing left to fill.
-void check_fillable(const SectionReader& section, const std::string& moisture_key,
-                    const std::string& soil_key_name, const Ground& ground, Reading& reading) {
-  const std::string key = moisture_key.empty() ? soil_key_name : moisture_key;
-  for (const SoilVariant& variant : ground.variants) {
-    const double head = initial_head(ground.moisture, variant.soil);
-    const double entry = variant.soil.curves->entry_head();
-    if (head < entry * (1 + 1e-9) || (entry == 0.0 && head < 0.0)) continue;
-    reading.contradiction(
-        section.value_place(key),
-        fmt::format("{}at suction {:.3g} cm this soil is still saturated: there is nothing to fill",
-                    section.front_of(key), -100 * head),
-        section.key_place(soil_key_name),
-        fmt::format("{}, {} drains from a suction of {:.3g} cm", variant.label, variant.source,
-                    -100 * entry),
-        "give a larger suction");
+void take_uppermost(std::vector<GroundLayer> layers, Ground& ground) {
+  if (layers.empty()) return;
+  ground.variants = std::move(layers.front().variants);
+  ground.moisture = layers.front().moisture;
+  layers.erase(layers.begin());
+  ground.layers_below = std::move(layers);
+}
+
+void read_truth(const SectionReader& section, Ground& ground, GroundPlaces& places,
+                Reading& reading) {
+  const auto truth = section.text("true Kfs of");
+  if (!truth || ground.variants.empty()) {
+    if (!section.has("true Kfs of") && !ground.layers_below.empty())
+      reading.assume(section.path_of("true Kfs of"),
+                     "true Kfs is that of the layer holding the foot of the wall");
     return;
   }
+  places.truth = section.value_place("true Kfs of");
+  if (const auto name = layer_called(*truth, ground)) {
+    ground.truth_layer = *name;
+    return;
+  }
+  section.problem("true Kfs of", fmt::format("there is no layer '{}' below the test", *truth),
+                  fmt::format("layers: {}", fmt::join(layer_names(ground), ", ")));
 }
 
-// "moist" = suction 300 cm (27 % water, 63 % full)
-void echo_moisture(const std::string& moisture_key, const SectionReader& section,
-                   const Ground& ground, Reading& reading) {
-  const Moisture& moisture = ground.moisture;
-  if (!models::suction_of_word(moisture.words)) return;
-  std::string contents;
-  for (const SoilVariant& variant : ground.variants) {
-    const auto state = models::moisture_at_suction(variant.soil, *moisture.suction);
-    contents += fmt::format("{}{:.0f} % water, {:.0f} % full", contents.empty() ? "" : "; ",
-                            100 * state.water_content, 100 * state.degree_of_saturation);
-  }
-  reading.assume(section.path_of(moisture_key.empty() ? "moisture" : moisture_key),
-                 fmt::format("\"{}\" = suction {:g} cm ({})", moisture.words,
-                             100 * *moisture.suction, contents));
-}
-
-void read_storage(const SectionReader& section, Ground& ground, Reading& reading) {
-  const auto storage = section.quantity("specific storage");
-  if (!section.has("specific storage")) {
-    reading.assume(section.path_of("specific storage"), "specific storage 0 1/m");
-  }
-  for (SoilVariant& variant : ground.variants)
-    variant.soil.specific_storage = storage.value_or(0.0);
+// Said once, for what no key speaks of.
+void assume_plain_ground(const SectionReader& section, const Ground& ground, Reading& reading) {
+  if (ground.layers_below.empty() && !ground.water_table && !section.has("layers"))
+    reading.assume(section.path_of("layers"),
+                   "the same soil all the way down, no water table within reach");
+  if (!ground.gap && !ground.disturbed)
+    reading.assume(section.path_of("wall gap"), "no gap and no disturbed soil along the wall");
 }
 
 }  // namespace
 
 Ground read_ground(const LocatedNode& node, const Place& where, const Key& grammar,
-                   Reading& reading) {
+                   GroundPlaces& places, Reading& reading) {
   Ground ground;
   const SectionReader section(node, grammar.keys, "ground", where, reading);
   if (section.is_broken()) return ground;
   read_water(section, ground, reading);
-  const std::string key = soil_key(section, where, reading);
-  const auto texture = read_texture(section);
-  const auto moisture_key = read_moisture_of(section, texture, ground, reading);
-  ground.variants = read_soil(section, key, texture, ground.moisture.suction, reading);
-  read_storage(section, ground, reading);
-  if (const auto name = section.text("name")) {
-    for (SoilVariant& variant : ground.variants) variant.label = *name;
+  GroundContext context;
+  context.specific_storage = read_storage(section, reading);
+  context.test_level = ground.test_level = read_test_level(section);
+  context.table = read_water_table(section, ground, reading);
+  if (context.table) places.water_table = context.table->place;
+  std::vector<GroundLayer> layers;
+  const bool own_soil = names_a_soil(section) || !section.has("layers");
+  if (own_soil) {
+    layers.push_back(read_layer(section, where, -ground.test_level, context, reading));
+    context.moisture = layers.front().moisture;
+  } else {
+    context.moisture = common_moisture(section, context, reading);
   }
-  if (!moisture_key || ground.variants.empty()) return ground;
-  if (!ground.moisture.suction)
-    check_moisture(section, *moisture_key, key, ground, reading);
-  else
-    check_fillable(section, *moisture_key, key, ground, reading);
-  echo_moisture(*moisture_key, section, ground, reading);
+  read_layers(section, context, own_soil, layers, reading);
+  take_uppermost(paired(section, below_test_level(std::move(layers)), reading), ground);
+  check_surface(section, ground, context, reading);
+  read_walls(section, ground);
+  ground.liner = section.quantity("liner");
+  if (ground.liner) places.liner = section.value_place("liner");
+  read_truth(section, ground, places, reading);
+  assume_plain_ground(section, ground, reading);
   return ground;
 }
 

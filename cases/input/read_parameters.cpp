@@ -11,6 +11,7 @@
 #include "cases/input/read_phrases.hpp"
 #include "models/soil/brooks_corey.hpp"
 #include "models/soil/catalogue.hpp"
+#include "models/soil/durner.hpp"
 #include "models/soil/gardner.hpp"
 #include "models/soil/van_genuchten.hpp"
 
@@ -26,6 +27,7 @@ struct Family {
 
 Family family_of(const std::string& name) {
   if (name == "Gardner") return {name, {"alpha"}, {}};
+  if (name == "Durner") return {name, {"alpha", "n", "alpha 2", "n 2", "weight 2"}, {"l"}};
   if (name == "Brooks-Corey") return {name, {"entry head", "lambda"}, {"l"}};
   return {name, {"alpha", "n"}, {"l"}};
 }
@@ -38,7 +40,8 @@ bool contains(const std::vector<std::string_view>& keys, std::string_view key) {
 bool check_family(const SectionReader& section, const Family& family, const Place& where,
                   Reading& reading) {
   const std::size_t before = reading.problems.size();
-  for (const std::string_view key : {"alpha", "n", "l", "entry head", "lambda"}) {
+  for (const std::string_view key :
+       {"alpha", "n", "l", "entry head", "lambda", "alpha 2", "n 2", "weight 2"}) {
     const bool has = section.has(key);
     if (contains(family.needed, key) && !has) {
       reading.problem(
@@ -52,7 +55,9 @@ bool check_family(const SectionReader& section, const Family& family, const Plac
                             "the curve is chosen here");
     } else {
       reading.problem(section.key_place(key), message,
-                      "name the curve, for example  curve: Brooks-Corey");
+                      key.ends_with(" 2")
+                          ? "two pore systems are a Durner curve: write  curve: Durner"
+                          : "name the curve, for example  curve: Brooks-Corey");
     }
   }
   return reading.problems.size() == before;
@@ -74,6 +79,21 @@ std::optional<double> read_Ks(const SectionReader& ground, const SectionReader& 
   return std::nullopt;
 }
 
+// Both pore systems share one minimum capillary height; the smaller n decides about it.
+CurvesPointer make_durner(const SectionReader& ground, const SectionReader& section, double alpha,
+                          double n, double l, Reading& reading) {
+  const auto alpha_2 = section.quantity("alpha 2");
+  const auto n_2 = section.quantity("n 2");
+  const auto weight_2 = section.quantity("weight 2");
+  if (!alpha_2 || !n_2 || !weight_2) return nullptr;
+  const std::array all_n{n, *n_2};
+  const auto h_s = read_minimum_capillary_height(ground, all_n, "parameters", reading);
+  const std::vector<models::PoreSystem> systems{{1.0 - *weight_2, alpha, n},
+                                                {*weight_2, *alpha_2, *n_2}};
+  return std::make_shared<models::Durner>(
+      systems, l, h_s.value_or(models::default_minimum_capillary_height(std::min(n, *n_2))));
+}
+
 CurvesPointer make_curves(const SectionReader& ground, const SectionReader& section,
                           const Family& family, Reading& reading) {
   const auto alpha = section.quantity("alpha");
@@ -87,6 +107,8 @@ CurvesPointer make_curves(const SectionReader& ground, const SectionReader& sect
   if (family.name == "Brooks-Corey" && entry_head && lambda) {
     return std::make_shared<models::BrooksCorey>(*entry_head, *lambda, l.value_or(0.5));
   }
+  if (family.name == "Durner" && alpha && n)
+    return make_durner(ground, section, *alpha, *n, l.value_or(0.5), reading);
   if (family.name == "van Genuchten" && alpha && n) {
     const std::array all_n{*n};
     const auto h_s = read_minimum_capillary_height(ground, all_n, "parameters", reading);
@@ -105,7 +127,7 @@ std::vector<SoilVariant> read_parameters(const SectionReader& ground, Reading& r
   const bool choice_is_wrong = section.has("curve") && !section.text("curve");
   if (choice_is_wrong) return {};
   const Family family = family_of(section.has("curve") ? *section.text("curve") : "van Genuchten");
-  if (family.name != "van Genuchten") {
+  if (family.name != "van Genuchten" && family.name != "Durner") {
     refuse_minimum_capillary_height(ground, family.name, section.key_place("curve"), reading);
   }
   const bool fits = check_family(section, family, where, reading);

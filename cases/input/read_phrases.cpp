@@ -6,6 +6,7 @@
 #include <string>
 #include <vector>
 
+#include "cases/input/phrase_parts.hpp"
 #include "cases/input/suggestion.hpp"
 #include "models/soil/alpha_star_class.hpp"
 #include "models/soil/moisture.hpp"
@@ -15,62 +16,6 @@ namespace ringwright::cases {
 namespace {
 
 constexpr double published_temperature = 20.0;
-
-// A quantity inside a phrase whose range the grammar of the key does not hold.
-std::optional<double> part(const SectionReader& section, std::string_view key,
-                           std::string_view text, Dimension dimension, const Range& range,
-                           Reading& reading) {
-  try {
-    const double value = reading.units.read(text, dimension);
-    if (value >= range.least && value <= range.most) return value;
-    section.problem(key, fmt::format("{} is out of range", trimmed(text)),
-                    "allowed: " + range.words);
-  } catch (const ValueError& error) {
-    section.problem(key, error.what(), error.hint());
-  }
-  return std::nullopt;
-}
-
-std::vector<std::string_view> split(std::string_view text, std::string_view at) {
-  std::vector<std::string_view> parts;
-  for (std::size_t end = text.find(at); end != std::string_view::npos; end = text.find(at)) {
-    parts.push_back(trimmed(text.substr(0, end)));
-    text.remove_prefix(end + at.size());
-  }
-  parts.push_back(trimmed(text));
-  return parts;
-}
-
-bool take_front(std::string_view& text, std::string_view word) {
-  if (!text.starts_with(word)) return false;
-  text = trimmed(text.substr(word.size()));
-  return true;
-}
-
-void refuse_stop(const SectionReader& section, std::string_view text) {
-  section.problem("stop", fmt::format("'{}' is not a stop rule", text),
-                  "write for example: after 6 h, or 3 readings within 5 %, or 8 h");
-}
-
-std::optional<models::StopWhenSteady> read_rule(const SectionReader& section, std::string_view text,
-                                                Reading& reading) {
-  const auto halves = split(text, " within ");
-  const auto words = split(halves[0], " ");
-  if (halves.size() != 2 || words.size() != 2 || words[1] != "readings") {
-    refuse_stop(section, text);
-    return std::nullopt;
-  }
-  const auto count =
-      part(section, "stop", words[0], Dimension::fraction, {2, 20, "2 to 20 readings"}, reading);
-  const auto within =
-      part(section, "stop", halves[1], Dimension::fraction, {0.001, 0.5, "0.1 % to 50 %"}, reading);
-  if (!count || !within) return std::nullopt;
-  if (*count != static_cast<int>(*count)) {
-    section.problem("stop", fmt::format("{} readings: a whole number is needed", words[0]));
-    return std::nullopt;
-  }
-  return models::StopWhenSteady{static_cast<int>(*count), *within};
-}
 
 }  // namespace
 
@@ -126,6 +71,10 @@ std::optional<Moisture> read_moisture(const SectionReader& section, std::string_
   } else if (take_front(value, "content ")) {
     moisture.water_content = part(section, key, value, Dimension::fraction,
                                   {0.001, 0.95, "0.1 % to 95 % of water"}, reading);
+  } else if (take_front(value, "hydrostatic to ")) {
+    take_back(value, " below ground");
+    moisture.hydrostatic_to = part(section, key, value, Dimension::length,
+                                   {0.01, 1000, "1 cm to 1000 m below ground"}, reading);
   } else if (value.ends_with(" full")) {
     value.remove_suffix(5);
     moisture.saturation = part(section, key, value, Dimension::fraction,
@@ -133,41 +82,12 @@ std::optional<Moisture> read_moisture(const SectionReader& section, std::string_
   } else {
     section.problem(
         key, fmt::format("'{}' does not say a moisture", text),
-        "write dry, moist, wet, or for example: suction 300 cm, content 25 %, 60 % full");
+        "write dry, moist, wet, or for example: suction 300 cm, content 25 %, 60 % full, "
+        "hydrostatic to 2 m");
   }
-  if (!moisture.suction && !moisture.water_content && !moisture.saturation) return std::nullopt;
-  return moisture;
-}
-
-std::optional<StopWords> read_stop(const SectionReader& section, Reading& reading) {
-  const auto text = section.text("stop");
-  if (!text) return std::nullopt;
-  auto alternatives = split(*text, " or ");
-  if (alternatives.size() > 2) {
-    section.problem("stop", fmt::format("'{}' has more than one 'or'", *text),
-                    "write for example: 3 readings within 5 %, or 8 h");
-    return std::nullopt;
-  }
-  StopWords stop;
-  if (alternatives[0].find("reading") != std::string_view::npos) {
-    if (alternatives[0].ends_with(',')) alternatives[0].remove_suffix(1);
-    stop.rule = read_rule(section, alternatives[0], reading);
-    if (!stop.rule) return std::nullopt;
-    alternatives.erase(alternatives.begin());
-  }
-  if (alternatives.size() > 1) {
-    section.problem("stop", fmt::format("'{}' names two times", *text), "keep one");
-    return std::nullopt;
-  }
-  if (alternatives.empty()) return stop;
-  take_front(alternatives[0], "after ");
-  if (!alternatives[0].empty() && std::isalpha(static_cast<unsigned char>(alternatives[0][0]))) {
-    refuse_stop(section, *text);
-    return std::nullopt;
-  }
-  stop.longest = section.quantity_in("stop", alternatives[0]);
-  if (!stop.longest) return std::nullopt;
-  return stop;
+  const bool any =
+      moisture.suction || moisture.water_content || moisture.saturation || moisture.hydrostatic_to;
+  return any ? std::optional(moisture) : std::nullopt;
 }
 
 std::optional<ReadWords> read_readings(const SectionReader& section, Reading& reading) {

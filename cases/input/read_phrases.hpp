@@ -7,7 +7,6 @@
 
 #include "cases/input/case.hpp"
 #include "cases/input/section_reader.hpp"
-#include "models/protocol/constant_head.hpp"
 
 namespace ringwright::cases {
 
@@ -22,15 +21,6 @@ std::optional<double> read_alpha_star(const SectionReader& section, std::string_
 /// @param key where `text` stands, for errors
 std::optional<Moisture> read_moisture(const SectionReader& section, std::string_view key,
                                       std::string_view text, Reading& reading);
-
-/// When a test ends.
-struct StopWords {
-  std::optional<models::StopWhenSteady> rule;
-  std::optional<double> longest;  ///< [s]
-};
-
-/// "after 6 h", "3 readings within 5 %", "3 readings within 5 %, or 8 h".
-std::optional<StopWords> read_stop(const SectionReader& section, Reading& reading);
 
 /// How readings are taken.
 struct ReadWords {

@@ -4,74 +4,48 @@
 
 #include <algorithm>
 
+#include "cases/input/read_heads.hpp"
+#include "cases/input/read_lid.hpp"
 #include "cases/input/read_protocol.hpp"
+#include "cases/input/read_rings.hpp"
 #include "cases/input/suggestion.hpp"
 
 namespace ringwright::cases {
 namespace {
 
-void read_insert(const SectionReader& section, Test& test) {
-  const auto insert = section.quantity("insert");
-  if (!insert) return;
-  constexpr double shallowest = 0.005;
-  if (*insert > 0 && *insert < shallowest * (1 - 1e-12)) {
-    section.problem(
-        "insert",
-        fmt::format("{} is neither 0 nor at least 0.5 cm", section.text("insert").value_or("")),
-        "so shallow a wall leaks under its foot: give 0 cm, or 0.5 cm and more");
-  }
-  test.ring.insertion = *insert;
-}
-
-void read_wall(const SectionReader& section, Test& test, Reading& reading) {
-  const auto wall = section.quantity("wall");
-  if (!section.has("wall")) {
-    // Driven in, a wall of any thickness is the same to the flow; on the surface it covers a strip.
-    if (test.ring.insertion == 0.0)
-      reading.assume(section.path_of("wall"),
-                     fmt::format("wall {:g} mm", 1e3 * test.wall_thickness));
-  }
-  test.wall_thickness = wall.value_or(test.wall_thickness);
-  test.ring.wall = test.wall_thickness;
-  if (wall && test.ring.radius > 0 && *wall >= test.ring.radius) {
-    reading.contradiction(section.value_place("wall"),
-                          section.front_of("wall") + "the wall is as thick as the ring is wide",
-                          section.value_place("ring"), "the ring's inner diameter");
-  }
-}
-
-// A ring cannot stand deeper than it is high, nor hold more water than stands out of the ground.
-void check_height(const SectionReader& section, const Test& test, Reading& reading) {
-  const auto height = section.quantity("height");
-  if (!height) return;
-  if (section.has("insert") && test.ring.insertion >= *height) {
+// A wall must not reach what the ground keeps for itself.
+void check_depth(const SectionReader& section, const Test& test, const GroundRead& read,
+                 Reading& reading) {
+  if (!section.has("insert")) return;
+  const auto check = [&](const std::optional<double>& depth, const std::optional<Place>& place,
+                         std::string_view message, std::string_view note) {
+    if (!depth || !place || test.ring.insertion < *depth) return;
     reading.contradiction(section.value_place("insert"),
-                          section.front_of("insert") + "deeper than the ring is high",
-                          section.value_place("height"), "height of the ring",
-                          "the height goes from the foot of the wall to its rim");
-  } else if (section.has("head") && test.ring.insertion + test.protocol.head > *height) {
-    reading.contradiction(
-        section.value_place("head"),
-        fmt::format("{}the ring stands only {:.3g} cm out of the ground", section.front_of("head"),
-                    100 * (*height - test.ring.insertion)),
-        section.value_place("height"), "height of the ring",
-        "the height goes from the foot of the wall to its rim");
-  }
+                          section.front_of("insert") + std::string(message), *place,
+                          std::string(note));
+  };
+  check(read.ground.water_table, read.places.water_table, "the wall stands in the water table",
+        "the water table");
+  check(read.ground.liner, read.places.liner, "the wall goes through the liner",
+        "thickness of the liner");
 }
 
-Test read_test(const LocatedNode::Entry& entry, const Key& grammar, const ProtocolWords& common,
-               Reading& reading) {
+Test read_test(const LocatedNode::Entry& entry, const Key& grammar, const SectionReader& common,
+               const GroundRead& ground, Reading& reading) {
   Test test;
   test.name = entry.first.text;
   const SectionReader section(entry.second, grammar.named, "tests." + test.name, entry.first.place,
                               reading);
   if (section.is_broken()) return test;
-  test.ring.radius = section.quantity("ring").value_or(0.0) / 2;
-  read_insert(section, test);
-  test.protocol.head = section.quantity("head").value_or(0.0);
-  read_wall(section, test, reading);
-  check_height(section, test, reading);
-  apply_protocol(section, read_protocol(section, reading), common, test, reading);
+  read_rings(section, test, reading);
+  read_lid(section, test, reading);
+  const HeadWords heads = read_heads(section, test.lid ? test.lid->underside : 0.0, reading);
+  if (heads.ok) {
+    check_height(section, test, heads, reading);
+    check_lid(section, test, heads, reading);
+  }
+  check_depth(section, test, ground, reading);
+  read_protocol({section, common}, heads, test, reading);
   return test;
 }
 
@@ -96,14 +70,13 @@ bool looks_like_test(const LocatedNode::Entry& entry, const Key& grammar, Readin
 }  // namespace
 
 std::vector<Test> read_tests(const LocatedNode& node, const Place& where, const Key& grammar,
-                             Reading& reading) {
+                             const GroundRead& ground, Reading& reading) {
   std::vector<Test> tests;
   const SectionReader section(node, grammar.keys, "tests", where, reading, true);
   if (section.is_broken()) return tests;
-  const ProtocolWords common = read_protocol(section, reading);
   for (const auto* entry : section.named()) {
     if (looks_like_test(*entry, grammar, reading)) {
-      tests.push_back(read_test(*entry, grammar, common, reading));
+      tests.push_back(read_test(*entry, grammar, section, ground, reading));
     }
   }
   if (section.named().empty()) {

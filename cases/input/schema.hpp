@@ -21,7 +21,10 @@ enum class ValueKind {
   choice,    ///< one of `choices`
   number,    ///< without a unit
   quantity,  ///< with a unit of `dimension`
-  section    ///< keys of its own
+  section,   ///< keys of its own
+  sections,  ///< a list of sections of the same keys; a phrase may stand for one where the key has
+             ///< examples of it, and one alone needs no list
+  phrases    ///< a phrase or a list of them
 };
 
 /// Allowed values in SI, both ends included unless said otherwise.
@@ -42,8 +45,10 @@ struct Key {
   Dimension dimension = Dimension::fraction;
   std::optional<Range> range = {};
   bool required = false;
+  /// Of a required key: others that may stand in its place.
+  std::vector<std::string> or_else = {};
   std::vector<std::string> choices = {};
-  std::vector<Key> keys = {};  ///< of a section
+  std::vector<Key> keys = {};  ///< of a section, or of each of several
   /// Of a section: keys not in `keys` are names the user chooses, each for a section of these.
   std::vector<Key> named = {};
 

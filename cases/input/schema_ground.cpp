@@ -1,109 +1,98 @@
 #include "cases/input/schema_ground.hpp"
 
+#include "cases/input/schema_soil.hpp"
+
 namespace ringwright::cases {
 namespace {
 
-Range conductivity_range() { return {1e-12, 0.05, "1e-12 m/s to 0.05 m/s"}; }
+Range depth_range(double least, const char* words) { return {least, 100.0, words}; }
 
-Key parameters_grammar() {
-  Key section{.name = "parameters", .kind = ValueKind::section};
+Key layers_grammar() {
+  Key layers{.name = "layers", .kind = ValueKind::sections, .also_called = {"layer", "horizons"}};
+  layers.meaning =
+      "Layers below the soil above, each from its depth below ground down to the next; without a "
+      "soil above, the first is the uppermost.";
+  layers.examples = {"clay loam from 5 ft down"};
+  layers.keys = {
+      {.name = "name",
+       .kind = ValueKind::text,
+       .meaning = "What to call this layer on the results.",
+       .examples = {"liner"}},
+      {.name = "from",
+       .kind = ValueKind::quantity,
+       .also_called = {"top", "below", "starts at"},
+       .meaning = "Depth of its upper edge below the surface of the ground.",
+       .examples = {"40 cm"},
+       .dimension = Dimension::length,
+       .range = depth_range(0.0, "0 cm to 100 m")},
+  };
+  const auto soil = soil_keys();
+  layers.keys.insert(layers.keys.end(), soil.begin(), soil.end());
+  return layers;
+}
+
+Key disturbed_grammar() {
+  Key section{.name = "disturbed", .kind = ValueKind::section, .also_called = {"smeared"}};
   section.meaning =
-      "The soil by its hydraulic parameters. van Genuchten: theta_r, theta_s, alpha, n; "
-      "Gardner: theta_r, theta_s, alpha; Brooks-Corey: theta_r, theta_s, entry head, lambda; "
-      "each with Ks (or Kfs beside it).";
+      "Soil disturbed by driving the ring, on both sides of the wall down to its foot.";
   section.keys = {
-      {.name = "curve",
-       .kind = ValueKind::choice,
-       .meaning = "Family of the curves; van Genuchten if not given.",
-       .examples = {"van Genuchten"},
-       .choices = {"van Genuchten", "Gardner", "Brooks-Corey"}},
-      {.name = "theta_r",
+      {.name = "width",
        .kind = ValueKind::quantity,
-       .meaning = "Residual water content.",
-       .examples = {"0.078"},
-       .range = Range{0.0, 0.5, "0 to 0.5"},
+       .meaning = "How far it reaches from the wall.",
+       .examples = {"1 cm"},
+       .dimension = Dimension::length,
+       .range = Range{0.001, 0.2, "1 mm to 20 cm"},
        .required = true},
-      {.name = "theta_s",
-       .kind = ValueKind::quantity,
-       .meaning = "Water content at saturation.",
-       .examples = {"0.43"},
-       .range = Range{0.0, 0.95, "above 0, up to 0.95", true},
+      {.name = "Ks x",
+       .kind = ValueKind::number,
+       .also_called = {"factor", "ks"},
+       .meaning = "Its conductivity over that of the soil: below 1 smeared, above 1 loosened.",
+       .examples = {"0.3"},
+       .range = Range{0.001, 1000.0, "0.001 to 1000"},
        .required = true},
-      {.name = "alpha",
-       .kind = ValueKind::quantity,
-       .meaning = "van Genuchten: inverse of a characteristic suction. Gardner: slope of ln K.",
-       .examples = {"3.6 1/m"},
-       .dimension = Dimension::per_head,
-       .range = Range{0.01, 200.0, "0.01 1/m to 200 1/m"}},
-      {.name = "n",
-       .kind = ValueKind::number,
-       .meaning = "van Genuchten's exponent, with m = 1 - 1/n.",
-       .examples = {"1.56"},
-       .range = Range{1.0, 20.0, "above 1, up to 20", true}},
-      {.name = "l",
-       .kind = ValueKind::number,
-       .meaning = "Exponent of the pore connectivity; 0.5 if not given.",
-       .examples = {"0.5"},
-       .range = Range{-2.0, 10.0, "above -2, up to 10", true}},
-      {.name = "entry head",
-       .kind = ValueKind::quantity,
-       .also_called = {"h b", "hb", "entry suction"},
-       .meaning = "Brooks-Corey: pressure head at which air enters, negative.",
-       .examples = {"-20 cm"},
-       .dimension = Dimension::head,
-       .range = Range{-10.0, -0.001, "-10 m to -0.1 cm"}},
-      {.name = "lambda",
-       .kind = ValueKind::number,
-       .meaning = "Brooks-Corey: pore-size distribution index.",
-       .examples = {"0.4"},
-       .range = Range{0.05, 20.0, "0.05 to 20"}},
-      {.name = "Ks",
-       .kind = ValueKind::quantity,
-       .meaning = "Saturated conductivity at 20 degC.",
-       .examples = {"1.04 cm/h"},
-       .dimension = Dimension::speed,
-       .range = conductivity_range()},
   };
   return section;
 }
 
-std::vector<Key> soil_keys() {
+std::vector<Key> place_keys() {
   return {
-      {.name = "texture",
+      {.name = "test level",
        .kind = ValueKind::phrase,
-       .also_called = {"soil", "class"},
-       .meaning = "USDA class of the soil, with a moisture word if wanted: its published averages.",
-       .examples = {"silt loam, moist", "sandy loam"}},
-      {.name = "published",
+       .also_called = {"level", "test depth", "pit"},
+       .meaning = "How deep below ground the ring stands; layers and water table count from the "
+                  "ground. 0 if not given.",
+       .examples = {"60 cm below ground"},
+       .dimension = Dimension::length,
+       .range = depth_range(0.0, "0 cm to 100 m")},
+      layers_grammar(),
+      {.name = "water table",
+       .kind = ValueKind::phrase,
+       .also_called = {"groundwater", "ground water"},
+       .meaning = "Depth of the water table below ground; the ground is hydrostatic to it.",
+       .examples = {"2 m"},
+       .dimension = Dimension::length,
+       .range = depth_range(0.02, "2 cm to 100 m")},
+      disturbed_grammar(),
+      {.name = "wall gap",
+       .kind = ValueKind::quantity,
+       .also_called = {"gap", "leak"},
+       .meaning = "Width of an open gap along both sides of the wall; none if not given.",
+       .examples = {"0.2 mm"},
+       .dimension = Dimension::length,
+       .range = Range{1e-5, 0.005, "0.01 mm to 5 mm"}},
+      {.name = "liner",
+       .kind = ValueKind::quantity,
+       .meaning = "Thickness of a liner from the level of the test down, for the share of it that "
+                  "the ring pierces.",
+       .examples = {"60 cm"},
+       .dimension = Dimension::length,
+       .range = Range{0.01, 20.0, "1 cm to 20 m"}},
+      {.name = "true Kfs of",
        .kind = ValueKind::text,
-       .meaning = "Use only this published table of class averages; all tables if not given.",
-       .examples = {"Carsel & Parrish 1988"}},
-      parameters_grammar(),
-      {.name = "capillary length",
-       .kind = ValueKind::quantity,
-       .meaning = "The soil by its macroscopic capillary length, with fillable porosity and Kfs.",
-       .examples = {"8 cm"},
-       .dimension = Dimension::head,
-       .range = Range{0.002, 5.0, "0.2 cm to 5 m"}},
-      {.name = "alpha star",
-       .kind = ValueKind::phrase,
-       .meaning = "The soil by alpha* = 1 / capillary length: a value or the words of a class, "
-                  "with fillable porosity and Kfs.",
-       .examples = {"0.12 1/cm", "structured"},
-       .dimension = Dimension::per_head,
-       .range = Range{0.2, 500.0, "0.002 1/cm to 5 1/cm"}},
-      {.name = "fillable porosity",
-       .kind = ValueKind::quantity,
-       .meaning = "Water content gained from before the test to saturation.",
-       .examples = {"25 %"},
-       .range = Range{0.005, 0.8, "0.5 % to 80 %"}},
-      {.name = "Kfs",
-       .kind = ValueKind::phrase,
-       .also_called = {"k", "ksat", "conductivity", "ks"},
-       .meaning = "Field-saturated conductivity, at 20 degC unless another temperature is named.",
-       .examples = {"18 mm/h at 20 degC"},
-       .dimension = Dimension::speed,
-       .range = conductivity_range()},
+       .also_called = {"truth", "true kfs"},
+       .meaning = "Name of the layer whose Kfs is the true one; that holding the foot of the wall "
+                  "if not given.",
+       .examples = {"liner"}},
   };
 }
 
@@ -127,18 +116,6 @@ Key ground_grammar() {
        .examples = {"10 degC"},
        .dimension = Dimension::temperature,
        .range = Range{0.0, 50.0, "0 degC to 50 degC"}},
-      {.name = "moisture",
-       .kind = ValueKind::phrase,
-       .meaning = "Before the test: dry, moist or wet (suction 3000, 300, 60 cm), a suction, a "
-                  "water content or a degree of saturation.",
-       .examples = {"moist", "suction 300 cm", "content 25 %", "60 % full"}},
-      {.name = "minimum capillary height",
-       .kind = ValueKind::quantity,
-       .also_called = {"h s", "hs"},
-       .meaning = "h_s of van Genuchten curves: saturated above it; -2 cm where n < 2, else 0.",
-       .examples = {"-2 cm"},
-       .dimension = Dimension::head,
-       .range = Range{-0.2, 0.0, "-20 cm to 0 cm"}},
       {.name = "specific storage",
        .kind = ValueKind::quantity,
        .also_called = {"ss", "storage"},
@@ -149,6 +126,8 @@ Key ground_grammar() {
   };
   const auto soil = soil_keys();
   section.keys.insert(section.keys.begin() + 2, soil.begin(), soil.end());
+  const auto place = place_keys();
+  section.keys.insert(section.keys.end(), place.begin(), place.end());
   return section;
 }
 

@@ -39,16 +39,29 @@ std::string found(const LocatedNode& node) {
 }  // namespace
 
 void Reading::problem(const Place& place, std::string message, std::string hint) {
-  problems.push_back({place, std::move(message), std::move(hint), {}, ""});
+  add({place, std::move(message), std::move(hint), {}, ""});
 }
 
 void Reading::contradiction(const Place& place, std::string message, const Place& other,
                             std::string other_note, std::string hint) {
-  problems.push_back({place, std::move(message), std::move(hint), other, std::move(other_note)});
+  add({place, std::move(message), std::move(hint), other, std::move(other_note)});
+}
+
+// A key beside all tests is read for each of them.
+void Reading::add(Diagnostic diagnostic) {
+  const bool known = std::any_of(problems.begin(), problems.end(), [&](const Diagnostic& other) {
+    return other.place.line == diagnostic.place.line &&
+           other.place.column == diagnostic.place.column && other.message == diagnostic.message;
+  });
+  if (!known) problems.push_back(std::move(diagnostic));
 }
 
 void Reading::assume(std::string key, std::string text) {
   assumed.push_back({std::move(key), std::move(text)});
+}
+
+void Reading::warn(std::string key, std::string text) {
+  warnings.push_back({std::move(key), std::move(text)});
 }
 
 SectionReader::SectionReader(const LocatedNode& node, const std::vector<Key>& keys,
@@ -101,6 +114,10 @@ void SectionReader::check_unknown(const LocatedNode::Entry& entry) {
 void SectionReader::check_missing() {
   for (const Key& key : keys_) {
     if (!key.required || entry_of(key.name) || is_suggested(key.name)) continue;
+    const bool other =
+        std::any_of(key.or_else.begin(), key.or_else.end(),
+                    [&](const std::string& name) { return entry_of(name) || is_suggested(name); });
+    if (other) continue;
     reading_.problem(where_, fmt::format("{}the key '{}' is missing", front(), key.name),
                      example_of(key));
   }
@@ -221,6 +238,16 @@ std::optional<std::string> SectionReader::text(std::string_view key) const {
 
 SectionReader SectionReader::subsection(std::string_view key) const {
   return {*value_of(key), grammar_of(key).keys, path_of(key), key_place(key), reading_};
+}
+
+std::vector<const LocatedNode*> SectionReader::items(std::string_view key) const {
+  const LocatedNode* node = value_of(key);
+  if (!node || node->refused) return {};
+  if (node->kind != LocatedNode::Kind::list) return {node};
+  std::vector<const LocatedNode*> result;
+  for (const LocatedNode& item : node->items) result.push_back(&item);
+  if (result.empty()) problem(key, "the list is empty", example_of(grammar_of(key)));
+  return result;
 }
 
 }  // namespace ringwright::cases

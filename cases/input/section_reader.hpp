@@ -18,13 +18,20 @@ struct Reading {
   Units units;
   std::vector<Diagnostic> problems;
   std::vector<Assumption> assumed;
+  std::vector<Assumption> warnings;
   bool from_flags = false;  ///< errors name flags, not paths
 
+  /// Said once, however often it is found.
   void problem(const Place& place, std::string message, std::string hint = "");
   /// Two places that cannot both hold. @param other_note what is at the second place
   void contradiction(const Place& place, std::string message, const Place& other,
                      std::string other_note, std::string hint = "");
   void assume(std::string key, std::string text);
+  /// What can be done as it is written but is hardly meant.
+  void warn(std::string key, std::string text);
+
+ private:
+  void add(Diagnostic diagnostic);
 };
 
 class SectionReader {
@@ -58,6 +65,10 @@ class SectionReader {
   const LocatedNode* section(std::string_view key) const { return value_of(key); }
   /// A reader of a section that is there.
   SectionReader subsection(std::string_view key) const;
+  /// The items of a list, or the value itself where it is none; empty if absent or reported.
+  std::vector<const LocatedNode*> items(std::string_view key) const;
+  /// The grammar of a key. @throws std::logic_error for a key that is not in it
+  const Key& grammar_of(std::string_view key) const;
 
   /// `text`, part of the value of `key`, as a quantity in the range of the grammar.
   std::optional<double> quantity_in(std::string_view key, std::string_view text) const;
@@ -73,7 +84,6 @@ class SectionReader {
  private:
   const LocatedNode* value_of(std::string_view key) const;
   const LocatedNode::Entry* entry_of(std::string_view key) const;
-  const Key& grammar_of(std::string_view key) const;
   const LocatedNode* scalar_of(std::string_view key) const;
   void check_unknown(const LocatedNode::Entry& entry);
   void check_missing();

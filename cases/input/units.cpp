@@ -4,6 +4,7 @@
 #include <udunits2.h>
 
 #include <array>
+#include <cctype>
 #include <stdexcept>
 
 #include "cases/input/suggestion.hpp"
@@ -54,8 +55,22 @@ Kind kind_of(Dimension dimension) {
       return {"a volume", "20 L", "m3"};
     case Dimension::flow:
       return {"a flow", "2 L/min", "m3/s"};
+    case Dimension::mass:
+      return {"a mass", "12 kg", "kg"};
   }
   throw std::logic_error("a dimension without a name");
+}
+
+// Where in "1 h 10 min" the second number begins.
+std::size_t second_number(std::string_view text) {
+  const auto is = [&](std::size_t i, auto test) {
+    return test(static_cast<unsigned char>(text[i])) != 0;
+  };
+  for (std::size_t i = 2; i < text.size(); ++i) {
+    const bool after_unit = is(i - 2, [](int c) { return std::isalpha(c); }) && text[i - 1] == ' ';
+    if (after_unit && is(i, [](int c) { return std::isdigit(c); })) return i;
+  }
+  return std::string_view::npos;
 }
 
 // The same quantity as a pressure, where water pressure may stand for a height of water.
@@ -126,6 +141,10 @@ Units::Units() : library_(std::make_unique<Library>()) {}
 Units::~Units() = default;
 
 double Units::read(std::string_view text, Dimension dimension) const {
+  if (dimension == Dimension::time) {
+    if (const std::size_t second = second_number(text); second != std::string_view::npos)
+      return read(text.substr(0, second), dimension) + read(text.substr(second), dimension);
+  }
   const ScannedNumber number = scan_number(text);
   const Kind kind = kind_of(dimension);
   if (number.rest.empty()) {

@@ -25,6 +25,7 @@ enum class Dimension {
   temperature_difference,  ///< [K]; 9 degF of difference are 5 K
   volume,                  ///< [m3]
   flow,                    ///< [m3/s]
+  mass,                    ///< [kg]
 };
 
 /// "a length", for messages.
@@ -46,7 +47,7 @@ class Units {
   Units(const Units&) = delete;
   Units& operator=(const Units&) = delete;
 
-  /// The quantity in `text` in the SI unit of `dimension`.
+  /// The quantity in `text` in the SI unit of `dimension`. A time may be "1 h 10 min".
   /// @throws ValueError for no number, no unit (except fractions), an unknown unit or another
   ///         kind of quantity
   double read(std::string_view text, Dimension dimension) const;

@@ -95,7 +95,8 @@ TEST_CASE("what is given is not assumed") {
                     "  minimum capillary height: -1 cm\n  specific storage: 1e-4 1/m\n"
                     "tests:\n  one head: { ring: 12\", insert: 0 cm, head: 0 cm, wall: 2 mm }\n"
                     "  stop: after 6 h\n  read: every 5 min, ruler to 2 mm, head kept to 1 cm\n"
-                    "  assumed alpha star: fine\n",
+                    "  assumed alpha star: fine\n  supply: 6 L/min\n  evaporation: 0 mm/d\n"
+                    "  gauge: 10 mL\n  reading error: 0 mL\n",
                 "x.yaml");
   CHECK(result.accuracy == Approx(0.003));
   CHECK(result.ground.water_temperature == Approx(10));
@@ -109,9 +110,12 @@ TEST_CASE("what is given is not assumed") {
   CHECK(result.tests[0].protocol.longest == Approx(6 * 3600));
   CHECK(result.tests[0].ruler == Approx(0.002));
   CHECK(result.tests[0].head_kept == Approx(0.01));
-  // Only the meaning of the moisture word is left to be told.
-  REQUIRE(result.assumed.size() == 1);
+  // Only the meaning of the moisture word is left to be told, and what no key speaks of.
+  REQUIRE(result.assumed.size() == 4);
   CHECK(result.assumed[0].text.starts_with("\"wet\" = suction 60 cm ("));
+  CHECK(assumes(result, "ground.layers", "the same soil all the way down"));
+  CHECK(assumes(result, "ground.wall gap", "no gap"));
+  CHECK(assumes(result, "tests.one head.ramp", "takes 5 s"));
 }
 
 TEST_CASE("words of a test go before those for all tests") {
