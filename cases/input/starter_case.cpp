@@ -17,6 +17,10 @@ ground:
   # moisture: suction 300 cm     # instead of the word: suction, content 25 %, or 60 % full
   # published: Carsel & Parrish 1988     # one table of class averages instead of all
   # minimum capillary height: -2 cm      # of the van Genuchten curve
+  # test level: 60 cm below ground       # layers and water table count from the ground
+  # layers: clay loam, wet from 5 ft down
+  # wall gap: 0.2 mm             # what driving the ring may do; or
+  # disturbed: { width: 1 cm, Ks x: 0.3 }
   #
   # Instead of the texture you may give the soil
   # by what a crew knows of it
@@ -33,8 +37,19 @@ tests:
     head: 5 cm                   # depth of water held in the ring
     # wall: 3 mm                 # counts for a ring set on the surface (insert: 0 cm)
     # height: 40 cm              # of the ring, to check that it holds all this
+    # outer ring: 60 cm          # of a double ring; outer insert, outer head: as inside
+    # soak: 5 cm for 30 min      # first, and not read
+    #
+    # Instead of the head
+    #   heads: 5 cm then 15 cm, each for 1 h
+    #   fall: from 20 cm to 5 cm
   stop: 3 readings within 5 %, or 8 h    # or: after 6 h
   read: every 10 min             # may go on: ruler to 1 mm, head kept to 5 mm
+  # also judge: after 6 h        # what another stop rule would have said
+  # gauge: 1 mm in a 10 cm tube  # one division of what the water is read on
+  # supply: 6 L/min              # the largest flow
+  # reservoir: 200 L
+  # evaporation: 5 mm/d
   # assumed alpha star: 0.12 1/cm        # what the crew puts into its formula
 )";
 }

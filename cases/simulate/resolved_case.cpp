@@ -1,18 +1,17 @@
 #include "cases/simulate/resolved_case.hpp"
 
-#include <string_view>
+#include "cases/simulate/resolved_test.hpp"
 
 namespace ringwright::cases {
 namespace {
 
 using nlohmann::json;
 
-json with_unit(double value, std::string_view unit) { return {{"value", value}, {"unit", unit}}; }
-
 json moisture_json(const Moisture& moisture) {
   json result = {{"words", moisture.words}};
   if (moisture.suction) result["suction"] = with_unit(*moisture.suction, "m");
   if (moisture.water_content) result["water_content"] = with_unit(*moisture.water_content, "1");
+  if (moisture.hydrostatic_to) result["hydrostatic_to"] = with_unit(*moisture.hydrostatic_to, "m");
   if (moisture.saturation) result["saturation"] = with_unit(*moisture.saturation, "1");
   return result;
 }
@@ -26,7 +25,32 @@ json soil_json(const SoilVariant& variant, const Moisture& moisture) {
           {"theta_s", with_unit(soil.theta_s, "1")},
           {"Kfs_at_20_degC", with_unit(soil.Ks, "m/s")},
           {"specific_storage", with_unit(soil.specific_storage, "1/m")},
+          {"horizontal_over_vertical_K", soil.anisotropy},
           {"initial_head", with_unit(initial_head(moisture, soil), "m")}};
+}
+
+json layer_json(const GroundLayer& layer) {
+  json soils = json::array();
+  for (const SoilVariant& variant : layer.variants)
+    soils.push_back(soil_json(variant, layer.moisture));
+  return {{"name", layer.name},
+          {"top", with_unit(layer.top, "m")},
+          {"moisture", moisture_json(layer.moisture)},
+          {"soils", soils}};
+}
+
+// What is not there has no key.
+void add_place(const Ground& ground, json& result) {
+  if (ground.test_level > 0) result["test_level_below_ground"] = with_unit(ground.test_level, "m");
+  for (const GroundLayer& layer : ground.layers_below)
+    result["layers_below"].push_back(layer_json(layer));
+  if (ground.water_table) result["water_table"] = with_unit(*ground.water_table, "m");
+  if (ground.disturbed)
+    result["disturbed"] = {{"width", with_unit(ground.disturbed->width, "m")},
+                           {"Ks_factor", ground.disturbed->factor}};
+  if (ground.gap) result["wall_gap"] = with_unit(ground.gap->width, "m");
+  if (ground.liner) result["liner"] = with_unit(*ground.liner, "m");
+  if (!ground.truth_layer.empty()) result["true_Kfs_of"] = ground.truth_layer;
 }
 
 json ground_json(const Ground& ground) {
@@ -34,33 +58,16 @@ json ground_json(const Ground& ground) {
   for (const SoilVariant& variant : ground.variants) {
     soils.push_back(soil_json(variant, ground.moisture));
   }
-  return {{"water_temperature", with_unit(ground.water_temperature, "degC")},
-          {"moisture", moisture_json(ground.moisture)},
-          {"soils", soils}};
-}
-
-json stop_json(const models::ConstantHead& protocol) {
-  json result = {{"longest", with_unit(protocol.longest, "s")}};
-  if (protocol.stop) {
-    result["readings"] = protocol.stop->readings;
-    result["within"] = with_unit(protocol.stop->within, "1");
-  }
+  json result = {{"water_temperature", with_unit(ground.water_temperature, "degC")},
+                 {"moisture", moisture_json(ground.moisture)},
+                 {"soils", soils}};
+  add_place(ground, result);
   return result;
 }
 
-json test_json(const Test& test) {
-  json result = {{"name", test.name},
-                 {"ring_radius", with_unit(test.ring.radius, "m")},
-                 {"insertion", with_unit(test.ring.insertion, "m")},
-                 {"wall_thickness", with_unit(test.wall_thickness, "m")},
-                 {"head", with_unit(test.protocol.head, "m")},
-                 {"stop", stop_json(test.protocol)},
-                 {"assumed_alpha_star", with_unit(test.assumed_alpha_star, "1/m")},
-                 {"ruler", with_unit(test.ruler, "m")},
-                 {"head_kept", with_unit(test.head_kept, "m")}};
-  if (const auto interval = test.protocol.reading_interval) {
-    result["reading_interval"] = with_unit(*interval, "s");
-  }
+json words(const std::vector<Assumption>& list) {
+  json result = json::array();
+  for (const Assumption& line : list) result.push_back({{"key", line.key}, {"text", line.text}});
   return result;
 }
 
@@ -68,16 +75,13 @@ json test_json(const Test& test) {
 
 json resolved_case(const Case& what) {
   json tests = json::array();
-  for (const Test& test : what.tests) tests.push_back(test_json(test));
-  json assumed = json::array();
-  for (const Assumption& assumption : what.assumed) {
-    assumed.push_back({{"key", assumption.key}, {"text", assumption.text}});
-  }
+  for (const Test& test : what.tests) tests.push_back(resolved_test(test));
   return {{"job", what.job},
           {"accuracy", with_unit(what.accuracy, "1")},
           {"ground", ground_json(what.ground)},
           {"tests", tests},
-          {"assumed", assumed}};
+          {"assumed", words(what.assumed)},
+          {"warnings", words(what.warnings)}};
 }
 
 }  // namespace ringwright::cases

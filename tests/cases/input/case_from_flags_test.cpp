@@ -84,6 +84,25 @@ TEST_CASE("a missing flag is named with an example") {
         "  hint: for example  --ring \"30 cm\"\n");
 }
 
+TEST_CASE("heads or a fall may stand for the head") {
+  CaseFlags flags = usual_flags();
+  flags.head.reset();
+  flags.heads = "5 cm then 15 cm, each for 1 h";
+  flags.outer_ring = "60 cm";
+  flags.supply = "6 L/min";
+  const Case heads = case_from_flags(flags);
+  CHECK(heads.tests[0].program.stages.size() == 2);
+  CHECK(heads.tests[0].outer_ring->radius == Approx(0.30));
+  CHECK(heads.tests[0].program.supply.largest_rate.value() == Approx(1e-4));
+  flags.heads.reset();
+  flags.fall = "from 20 cm to 5 cm";
+  CHECK(case_from_flags(flags).tests[0].rule->kind == models::StopKind::after_volume);
+  flags.fall = "from 5 cm to 20 cm";
+  CHECK(errors_of(flags) ==
+        "--fall \"from 5 cm to 20 cm\": error: a fall from 5 cm does not reach 20 cm\n"
+        "  hint: name the higher level first\n");
+}
+
 TEST_CASE("a flag cannot bring keys of its own into the text") {
   CaseFlags flags = usual_flags();
   flags.water = "10 degC'\n  Kfs: '5 mm/h";

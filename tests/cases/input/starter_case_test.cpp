@@ -24,8 +24,10 @@ TEST_CASE("the starter file reads without errors") {
 }
 
 TEST_CASE("every commented key of the starter file reads when it is brought to life") {
-  for (const char* key : {"accuracy", "Kfs", "published", "minimum capillary height", "wall",
-                          "height", "assumed alpha star"}) {
+  for (const char* key :
+       {"accuracy", "Kfs", "published", "minimum capillary height", "wall", "height",
+        "assumed alpha star", "test level", "layers", "wall gap", "disturbed", "outer ring", "soak",
+        "also judge", "gauge", "supply", "reservoir", "evaporation"}) {
     INFO(key);
     CHECK_NOTHROW(read_case(with_key(key), "new.yaml"));
   }
