@@ -2,6 +2,7 @@
 
 #include <fmt/format.h>
 
+#include <algorithm>
 #include <array>
 #include <cmath>
 
@@ -133,6 +134,41 @@ std::string_view kind_of(const SectionReader& section, Reading& reading) {
   return found;
 }
 
+// Keys that would be read for nothing beside this kind of heads.
+void refuse_strays(const SectionReader& section, std::string_view kind, const HeadWords& words,
+                   Reading& reading) {
+  if (kind.empty()) return;
+  const auto refuse = [&](std::string_view key, std::string_view message, std::string_view hint) {
+    if (section.has(key))
+      reading.contradiction(section.key_place(key), section.front_of(key) + std::string(message),
+                            section.key_place(kind), fmt::format("'{}' is given here", kind),
+                            std::string(hint));
+  };
+  if (kind != "head")
+    refuse("pressure", "a pressure goes with one 'head', the depth under the lid",
+           "heads count from the soil: depth plus pressure");
+  if (kind != "fall")
+    refuse("refill below", "only a fall is filled up again",
+           kind == "stages" ? "put it into the stage that falls" : "write  fall: from 20 cm");
+  const bool falls = std::any_of(words.stages.begin(), words.stages.end(), [](const auto& stage) {
+    return stage.stage.kind == models::StageKind::free_fall;
+  });
+  if (words.ok && !falls && !section.has("lid"))
+    refuse("falls in", "no level falls in this test", "write  fall: from 20 cm");
+  if (words.ok && words.stages.size() == 1 && !section.has("soak"))
+    refuse("step down", "there is no step down", "leave it out");
+}
+
+HeadWords read_kind(const SectionReader& section, std::string_view kind, double depth,
+                    Reading& reading) {
+  if (kind == "head" && section.has("pressure"))
+    return read_sequence(section, "pressure", depth, reading);
+  if (kind == "heads") return read_sequence(section, kind, 0.0, reading);
+  if (kind == "fall") return one_fall(section, reading);
+  if (kind == "stages") return read_stages(section, reading);
+  return one_head(section);
+}
+
 }  // namespace
 
 StageWords constant_stage(double head, const Place& place) {
@@ -162,12 +198,9 @@ std::optional<StageWords> read_soak(const SectionReader& section, Reading& readi
 
 HeadWords read_heads(const SectionReader& section, double depth, Reading& reading) {
   const std::string_view kind = kind_of(section, reading);
-  if (kind == "head" && section.has("pressure"))
-    return read_sequence(section, "pressure", depth, reading);
-  if (kind == "heads") return read_sequence(section, kind, 0.0, reading);
-  if (kind == "fall") return one_fall(section, reading);
-  if (kind == "stages") return read_stages(section, reading);
-  return one_head(section);
+  HeadWords words = read_kind(section, kind, depth, reading);
+  refuse_strays(section, kind, words, reading);
+  return words;
 }
 
 }  // namespace ringwright::cases

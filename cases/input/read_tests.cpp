@@ -14,15 +14,14 @@ namespace ringwright::cases {
 namespace {
 
 // A wall must not reach what the ground keeps for itself.
-void check_depth(const SectionReader& section, const Test& test, const GroundRead& read,
-                 Reading& reading) {
-  if (!section.has("insert")) return;
+void check_depth(const SectionReader& section, std::string_view key, double insertion,
+                 const GroundRead& read, Reading& reading) {
+  if (!section.has(key)) return;
   const auto check = [&](const std::optional<double>& depth, const std::optional<Place>& place,
                          std::string_view message, std::string_view note) {
-    if (!depth || !place || test.ring.insertion < *depth) return;
-    reading.contradiction(section.value_place("insert"),
-                          section.front_of("insert") + std::string(message), *place,
-                          std::string(note));
+    if (!depth || !place || insertion < *depth) return;
+    reading.contradiction(section.value_place(key), section.front_of(key) + std::string(message),
+                          *place, std::string(note));
   };
   check(read.ground.water_table, read.places.water_table, "the wall stands in the water table",
         "the water table");
@@ -44,7 +43,9 @@ Test read_test(const LocatedNode::Entry& entry, const Key& grammar, const Sectio
     check_height(section, test, heads, reading);
     check_lid(section, test, heads, reading);
   }
-  check_depth(section, test, ground, reading);
+  check_depth(section, "insert", test.ring.insertion, ground, reading);
+  if (test.outer_ring)
+    check_depth(section, "outer insert", test.outer_ring->insertion, ground, reading);
   read_protocol({section, common}, heads, test, reading);
   return test;
 }
