@@ -9,15 +9,10 @@
 #include <memory>
 #include <vector>
 
-#include "models/soil/curves.hpp"
+#include "solver/flow/material.hpp"
 #include "solver/virtual_test.hpp"
 
 namespace ringwright::solver {
-
-struct Material {
-  models::Soil soil;
-  std::shared_ptr<const CurveTable> table;
-};
 
 /// Soil index of layer `layer` (0: the uppermost).
 int layer_index(const TestSetup& setup, int layer);

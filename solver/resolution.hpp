@@ -12,13 +12,17 @@
 /// the worst 2.2 %. The error of an answer is not taken from these rules but estimated from
 /// companion runs; since that estimate is two to four times the error, answers begin finer
 /// (postprocess/reading/answer_question.cpp).
+///
+/// With more than one ring or soil the smallest cell that any of them asks for is taken, and lines
+/// close to a foot (another foot, the top of a layer, the border of disturbed soil) ask for
+/// cells of at most half their distance, down to an eighth.
 
 #include "solver/virtual_test.hpp"
 
 namespace ringwright::solver {
 
 /// @param accuracy relative, of every promised figure [-]
-/// @param capillary_length of the soil [m]
+/// @param capillary_length of the uppermost soil [m]; those of the layers come from their curves
 /// @param first_time when the first volume is promised [s]
 Resolution resolution_for(const TestSetup& setup, double accuracy, double capillary_length,
                           double first_time);

@@ -16,6 +16,7 @@
 namespace ringwright::solver {
 
 class CurveTable;
+struct Material;
 
 /// The physical question. The first fields make the simplest test, a single ring at a constant head
 /// on uniform ground; what follows `more` is left empty for it.
@@ -88,9 +89,10 @@ struct Sample {
   double ring_flow = 0.0;    ///< [m3/s]
   double drainage_volume =
       0.0;  ///< out of the bottom, drainage of the initial profile included [m3]
-  double seepage_volume = 0.0;  ///< out of the surface outside the ring [m3]
+  double seepage_volume = 0.0;  ///< out of the surface outside the rings [m3]
   double stored_volume = 0.0;   ///< change of the water stored in the soil [m3]
   Wetted wetted;                ///< ground wetted so far
+  double side_volume = 0.0;     ///< out of the side, towards a water table far outside [m3]
   RingWater water = {};         ///< of the (inner) ring
   RingWater outer_water = {};   ///< of the annulus of a double ring
 };
@@ -131,7 +133,8 @@ struct RunStatistics {
   int cells = 0;
   long steps = 0, newton_iterations = 0, factorisations = 0, convergence_failures = 0;
   int domain_enlargements = 0;
-  double balance_error = 0.0;                      ///< |storage + out - in| over throughput [-]
+  bool domain_reached = false;  ///< water came to the edge of the largest domain tried
+  double balance_error = 0.0;   ///< |storage + out - in| over throughput [-]
   double domain_radius = 0.0, domain_depth = 0.0;  ///< [m]
 };
 
@@ -154,8 +157,11 @@ using StepObserver = std::function<bool(double)>;
 /// @throws std::invalid_argument when the soil is saturated before the test
 TestRun run_test(const TestSetup& setup, const Resolution& resolution,
                  const StepObserver& observer = {});
-/// The same with a look-up table of the soil's curves made before.
+/// The same with a look-up table of the uppermost soil's curves made before.
 TestRun run_test(const TestSetup& setup, const Resolution& resolution,
                  std::shared_ptr<const CurveTable> table, const StepObserver& observer = {});
+/// The same with the materials of ground_materials(setup).
+TestRun run_test(const TestSetup& setup, const Resolution& resolution,
+                 const std::vector<Material>& materials, const StepObserver& observer = {});
 
 }  // namespace ringwright::solver

@@ -1,6 +1,7 @@
 #pragma once
 /// Everything that is done with the water in one ring during a test.
 
+#include <optional>
 #include <vector>
 
 #include "models/protocol/stage.hpp"
@@ -29,7 +30,7 @@ struct EmptySpell {
 struct PondProgram {
   std::vector<Stage> stages;  ///< one after the other; the last holds to the end of the test
   Supply supply;
-  Vessel vessel;
+  std::optional<Vessel> vessel = std::nullopt;  ///< none: the open ring itself
   double evaporation = 0.0;  ///< from an open water surface [m/s]
   std::vector<EmptySpell> empty;
 };

@@ -10,7 +10,8 @@ enum class Boundary {
   head,           ///< pressure head given [m], negative too
   flux,           ///< volume flux into the soil given [m/s]
   free_drainage,  ///< unit gradient: flux out = K
-  seepage         ///< open to the air: closed while h < 0, at h = 0 while water comes out
+  seepage,        ///< open to the air: closed while h < 0, at h = 0 while water comes out
+  pond            ///< under water whose level is an unknown (pond.hpp)
 };
 
 /// A condition; `value` is evaluated at (time [s], position along the patch [m]).

@@ -50,6 +50,15 @@ class CurveTable {
     return u < switch_ ? dry_point(u) : wet_point(u);
   }
 
+  /// All curves at pressure head h [m]; slopes with respect to h.
+  CurvePoint at_head(double h) const {
+    if (h >= switch_) return at(h);
+    CurvePoint p = at(u_of_head(h));
+    const double du_dh = p.K / p.dPhi;  // since dPhi/dh = K
+    p.dSe *= du_dh, p.dK *= du_dh, p.dPhi = p.K;
+    return p;
+  }
+
   double u_of_head(double h) const;
   double u_of_saturation(double Se) const { return switch_ + (Se - switch_saturation_) / slope_; }
   double head_of_u(double u) const;

@@ -42,7 +42,8 @@ class SteadyNewton {
 
 // Sum of |net outflow|; the flow system holds the state of Phi afterwards.
 double SteadyNewton::defect(std::span<const double> Phi) {
-  for (std::size_t i = 0; i < u_.size(); ++i) u_[i] = flow_.table().u_of_potential(Phi[i]);
+  for (std::size_t i = 0; i < u_.size(); ++i)
+    u_[i] = flow_.table(static_cast<int>(i)).u_of_potential(Phi[i]);
   flow_.set_state(u_);
   flow_.net_outflow(out_);
   inflow_ = 0.0;

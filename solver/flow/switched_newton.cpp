@@ -19,7 +19,7 @@ SwitchedNewton::SwitchedNewton(FlowSystem& flow, const NewtonTolerances& toleran
     : flow_(flow),
       tolerances_(tolerances),
       klu_(flow.pattern()),
-      residual_(static_cast<std::size_t>(flow.cells())),
+      residual_(static_cast<std::size_t>(flow.unknowns())),
       step_(residual_.size()),
       matrix_(flow.pattern().rows.size()) {}
 
@@ -28,16 +28,18 @@ double SwitchedNewton::residual(std::span<const double> W, std::span<const doubl
   flow_.set_state(u);
   flow_.net_outflow(residual_);
   const auto V = flow_.volume();
-  double worst = 0.0, sum = 0.0, total_volume = 0.0, through = 0.0;
+  const auto cells = static_cast<std::size_t>(flow_.cells());
+  double worst = 0.0, sum = 0.0, ponds = 0.0, total_volume = 0.0, through = 0.0;
   for (std::size_t i = 0; i < residual_.size(); ++i) {
     residual_[i] += V[i] * (W_rate[i] + c * (flow_.storage(static_cast<int>(i)) - W[i]));
     const double size = std::abs(residual_[i]) / (c * V[i]);
     if (!(size <= worst)) worst = std::isnan(size) ? kBeyondNumbers : size;
     sum += residual_[i];
+    if (i >= cells) ponds += std::abs(residual_[i]);
     total_volume += V[i];
   }
   for (double q : flow_.patch_outflow()) through += std::abs(q);
-  imbalance_ = std::abs(sum) / (tolerances_.balance * through + kRoundOff * c * total_volume);
+  imbalance_ = (std::abs(sum) + ponds) / (tolerances_.balance * through + kRoundOff * c * total_volume);
   return worst;
 }
 
@@ -54,9 +56,9 @@ bool SwitchedNewton::refresh(double c) {
 }
 
 double SwitchedNewton::update(std::span<double> u) const {
-  const double driest = flow_.table().driest(), entry = flow_.table().entry();
   double largest = 0.0;
   for (std::size_t i = 0; i < u.size(); ++i) {
+    const auto [driest, entry, turn] = flow_.bounds(static_cast<int>(i));
     const double old = u[i];
     double next = old - step_[i];
     const double size = std::abs(step_[i]);

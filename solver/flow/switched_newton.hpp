@@ -8,7 +8,7 @@
 /// theta = theta(h) identically and nothing is ever extrapolated in h across a front.
 ///
 /// The convergence test is a maximum over the cells, not a mean (and, for the water balance, the
-/// sum of the defects against the flow through the boundary): a mean over a graded mesh
+/// sum of the defects, and that of every pond, against the flow through the boundary): a mean over a graded mesh
 /// is diluted by idle cells and accepts steps whose front is unconverged. The matrix is
 /// kept while it contracts well and refreshed within the iteration when it does not; a
 /// fresh matrix that contracts badly is no failure by itself.
@@ -23,7 +23,8 @@ namespace ringwright::solver {
 
 struct NewtonTolerances {
   double storage = 1e-5;  ///< largest defect r / (c V) accepted [-]
-  double balance = 5e-7;  ///< sum of the defects over the flow through the boundary [-]
+  double balance = 5e-7;  ///< sum of the defects, and those of ponds, over the flow through the
+                          ///< boundary [-]
   double unknown = 2e-4;  ///< largest remaining error of u accepted [m]
   int iterations = 16;    ///< most per step
 };
@@ -56,7 +57,7 @@ class SwitchedNewton {
   KluSolver klu_;
   std::vector<double> residual_, step_, matrix_;
   double imbalance_ = 0.0;  // of the last residual, over its tolerance
-  double matrix_c_ = 0.0;  // the coefficient the matrix was made with; 0: none
+  double matrix_c_ = 0.0;   // the coefficient the matrix was made with; 0: none
   long iterations_ = 0;
   int last_iterations_ = 0;
 };

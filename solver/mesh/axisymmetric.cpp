@@ -35,6 +35,11 @@ struct Section {
     return from > 0.0 ? 2 * pi * height(j) / std::log(to / from)
                       : 2 * pi * at * height(j) / (to - from);
   }
+  // Part of that resistance between `from` and the face.
+  double side_part(double at, double from, double to) const {
+    return rotated && from > 0.0 ? std::log(at / from) / std::log(to / from)
+                                 : (at - from) / (to - from);
+  }
   double side_area(double at, int j) const { return rotated ? 2 * pi * at * height(j) : height(j); }
 };
 
@@ -57,7 +62,8 @@ void add_vertical_flow(Section& s) {
   for (int j = 0; j + 1 < s.rows(); ++j)
     for (int i = 0; i < s.columns(); ++i) {
       const double rise = s.zc(j) - s.zc(j + 1);
-      s.mesh.faces.push_back({s.cell(i, j), s.cell(i, j + 1), s.plan_area(i) / rise, rise});
+      s.mesh.faces.push_back({s.cell(i, j), s.cell(i, j + 1), s.plan_area(i) / rise, rise,
+                              (s.zc(j) - s.z[j + 1]) / rise});
     }
 }
 
@@ -72,7 +78,8 @@ void add_horizontal_flow(Section& s, const std::vector<Wall>& walls) {
     for (int i = 0; i + 1 < s.columns(); ++i) {
       if (behind_wall(walls, s.x[i + 1], s.zc(j))) continue;
       s.mesh.faces.push_back({s.cell(i, j), s.cell(i + 1, j),
-                              s.side_transmissibility(s.x[i + 1], s.xc(i), s.xc(i + 1), j), 0.0});
+                              s.side_transmissibility(s.x[i + 1], s.xc(i), s.xc(i + 1), j), 0.0,
+                              s.side_part(s.x[i + 1], s.xc(i), s.xc(i + 1)), true});
     }
 }
 
@@ -107,7 +114,7 @@ void add_side(Section& s, bool right, const std::string& name) {
     const double from = right ? s.xc(i) : at, to = right ? at : s.xc(i);
     s.mesh.boundary.push_back({s.cell(i, j), patch(s.mesh, name),
                                s.side_transmissibility(at, from, to, j), 0.0, s.side_area(at, j),
-                               0.0, s.zc(j), s.zc(j)});
+                               0.0, s.zc(j), s.zc(j), true});
   }
 }
 
@@ -128,22 +135,32 @@ void correct_tip(Section& s, const Wall& w) {
   // real axis down, imaginary axis outwards
   const auto at = [&](double x, double z) { return TipPoint(-w.depth - z, x - w.radius); };
   const auto centre = [&](int k, int l) { return at(s.xc(k), s.zc(l)); };
-  const TipPoint foot = 0.0;
-  const auto correct = [&](int k, int l, int k2, int l2, TipPoint end) {
-    face_between(s.mesh, s.cell(k, l), s.cell(k2, l2)).transmissibility *=
-        tip_factor(foot, end, centre(k, l), centre(k2, l2));
+  const auto correct = [&](int k, int l, int k2, int l2, double factor) {
+    face_between(s.mesh, s.cell(k, l), s.cell(k2, l2)).transmissibility *= factor;
   };
-  correct(i - 1, j - 1, i - 1, j, at(s.x[i - 1], -w.depth));
-  correct(i, j - 1, i, j, at(s.x[i + 1], -w.depth));
-  correct(i - 1, j, i, j, at(w.radius, s.z[j + 1]));
+  if (w.ground.one_isotropic_soil()) {
+    const auto factor = [&](int k, int l, int k2, int l2, TipPoint end) {
+      correct(k, l, k2, l2, tip_factor(0.0, end, centre(k, l), centre(k2, l2)));
+    };
+    factor(i - 1, j - 1, i - 1, j, at(s.x[i - 1], -w.depth));
+    factor(i, j - 1, i, j, at(s.x[i + 1], -w.depth));
+    factor(i - 1, j, i, j, at(w.radius, s.z[j + 1]));
+    return;
+  }
+  const TipField field(w.ground);
+  for (int k : {i - 1, i})
+    correct(k, j - 1, k, j,
+            field.factor_beside(s.x[k + 1] - s.x[k], centre(k, j - 1), centre(k, j)));
+  correct(i - 1, j, i, j, field.factor_below(s.height(j), centre(i - 1, j), centre(i, j)));
 }
 
 void correct_pond_edge(Section& s, const Wall& w) {
   const int outer = edge_index(s.x, w.radius);
   const int wet = w.pond_inside ? outer - 1 : outer, dry = w.pond_inside ? outer : outer - 1;
   // real axis along the pond, imaginary axis down
+  const double stretch = w.ground.stretch_below;
   const auto at = [&](double x, double z) {
-    return TipPoint(w.pond_inside ? w.radius - x : x - w.radius, -z);
+    return TipPoint((w.pond_inside ? w.radius - x : x - w.radius) / stretch, -z);
   };
   const auto centre = [&](int k) { return at(s.xc(k), s.zc(0)); };
   face_between(s.mesh, s.cell(outer - 1, 0), s.cell(outer, 0)).transmissibility *=
@@ -168,7 +185,8 @@ CellsAndFaces axisymmetric_mesh(const std::vector<double>& radii,
   add_horizontal_flow(s, walls);
   add_top_and_bottom(s, walls, surface);
   add_side(s, true, "side");
-  for (const Wall& w : walls) w.depth > 0 ? correct_tip(s, w) : correct_pond_edge(s, w);
+  for (const Wall& w : walls)
+    if (w.corrected) w.depth > 0 ? correct_tip(s, w) : correct_pond_edge(s, w);
   return std::move(s.mesh);
 }
 

@@ -3,8 +3,8 @@
 ///
 /// Rectangular cells between given radii and elevations, true volumes and areas of the
 /// full circle. A wall is the absence of faces along its radius; the three faces that
-/// meet at its foot carry the tip correction. Patches: one per stretch of the surface
-/// between walls ("ring", or "ring 1", ... from the axis outwards, then "outside"),
+/// meet at its foot carry the tip correction unless the wall says no. Patches: one per stretch of
+/// the surface between walls ("ring", or "ring 1", ... from the axis outwards, then "outside"),
 /// "bottom" and "side".
 
 #include <string>

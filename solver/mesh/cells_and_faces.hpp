@@ -24,6 +24,7 @@ struct Face {
   double transmissibility = 0;  ///< [m]: area [m2] over distance [m]
   double rise = 0;              ///< elevation of a minus elevation of b [m]
   double part_a = 0.5;          ///< part of the resistance, and of the rise, on the side of a [-]
+  bool horizontal = false;      ///< the flow through it is horizontal: the soil's anisotropy acts
 };
 
 struct BoundaryFace {
@@ -35,6 +36,7 @@ struct BoundaryFace {
   double normal_down = 0;       ///< downward component of the outward unit normal [-]
   double elevation = 0;         ///< of the face centre [m]
   double position = 0;          ///< coordinate along the patch, for a head that varies there [m]
+  bool horizontal = false;      ///< as of an inner face
 };
 
 /// Cell polygons in the plane of the section, for drawing and export only.

@@ -1,17 +1,12 @@
 #include "solver/mesh/ring_mesh.hpp"
 
-#include <algorithm>
-#include <stdexcept>
-
 #include "solver/mesh/axisymmetric.hpp"
-#include "solver/mesh/grading.hpp"
+#include "solver/mesh/ring_lines.hpp"
+#include "solver/mesh/ring_soils.hpp"
+#include "solver/mesh/ring_walls.hpp"
 
 namespace ringwright::solver {
 namespace {
-
-void append(std::vector<double>& edges, const std::vector<double>& more) {
-  edges.insert(edges.end(), more.begin() + (edges.empty() ? 0 : 1), more.end());
-}
 
 std::vector<double> split(std::vector<double> edges, int times) {
   for (; times > 0; --times) {
@@ -28,30 +23,22 @@ std::vector<double> split(std::vector<double> edges, int times) {
 
 }  // namespace
 
+CellsAndFaces ring_mesh(const TestSetup& setup, const Domain& domain,
+                        const Resolution& resolution) {
+  const RingWalls rings = ring_walls(setup);
+  CellsAndFaces mesh =
+      axisymmetric_mesh(split(ring_radii(setup, domain, resolution), resolution.splits),
+                        split(ring_elevations(setup, domain, resolution), resolution.splits),
+                        rings.walls, rings.surface);
+  set_soils(setup, mesh);
+  return mesh;
+}
+
 CellsAndFaces ring_mesh(const models::SingleRing& ring, const Domain& domain,
                         const Resolution& resolution) {
-  const double a = ring.radius, d = ring.insertion;
-  const double tip = resolution.tip_cell, growth = resolution.growth;
-  const bool on_surface = d <= 0.0;
-  if (on_surface && !(ring.wall > 0.0))
-    throw std::invalid_argument("a ring on the surface needs a wall thicker than 0");
-  std::vector<double> radii = graded_one_end(a, 0.0, tip, growth), elevations;
-  std::reverse(radii.begin(), radii.end());
-  radii.front() = 0.0;
-  if (on_surface) append(radii, graded_both_ends(a, a + ring.wall, tip, tip, growth));
-  append(radii, graded_one_end(radii.back(), domain.radius, tip, growth));
-  if (!on_surface)
-    append(elevations,
-           graded_both_ends(0.0, -d, resolution.top_cell, tip, resolution.growth_inside));
-  append(elevations, graded_one_end(-d, -domain.depth, tip, resolution.growth_down));
-  std::vector<Wall> walls{{a, d, true}};
-  std::vector<std::string> surface{"ring", "outside"};
-  if (on_surface) {
-    walls.push_back({a + ring.wall, 0.0, false});
-    surface = {"ring", "wall", "outside"};
-  }
-  return axisymmetric_mesh(split(radii, resolution.splits), split(elevations, resolution.splits),
-                           walls, surface);
+  TestSetup setup;
+  setup.ring = ring;
+  return ring_mesh(setup, domain, resolution);
 }
 
 }  // namespace ringwright::solver

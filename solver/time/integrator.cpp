@@ -28,7 +28,7 @@ struct Integrator::Impl final : StepSolver {
   FlowSystem& flow;
   SwitchedNewton newton;
   double tolerance;
-  std::size_t n, m;  // cells, patches
+  std::size_t n, m;  // unknowns, totals
 
   ContextHandle context = make_context();
   VectorHandle y, yp, work;
@@ -46,8 +46,8 @@ struct Integrator::Impl final : StepSolver {
       : flow(f),
         newton(f, {.storage = kStorageShare * theta_tolerance, .unknown = kUnknownTolerance}),
         tolerance(theta_tolerance),
-        n(static_cast<std::size_t>(f.cells())),
-        m(static_cast<std::size_t>(f.patches())),
+        n(static_cast<std::size_t>(f.unknowns())),
+        m(f.totals().size()),
         u(n),
         u_before(n),
         u_trial(n) {
@@ -99,18 +99,19 @@ void Integrator::Impl::make_ida() {
 // Dry cells follow IDA's predicted water content (u is affine in it), wet cells go on in a
 // straight line.
 void Integrator::Impl::guess(double t_new, std::span<const double> W) {
-  const CurveTable& table = flow.table();
   const double ratio = u_rate_span > 0.0 ? std::min((t_new - t) / u_rate_span, 3.0) : 0.0;
   for (std::size_t i = 0; i < n; ++i) {
-    if (u[i] < table.switch_point()) {
-      const double Se = W[i] / flow.fillable();
-      const double next = table.u_of_saturation(Se);
-      const double floor = table.driest() + 0.1 * (u[i] - table.driest());
-      u_trial[i] = std::clamp(next, floor, std::max(table.entry(), u[i]));
+    const int cell = static_cast<int>(i);
+    const auto [driest, entry, turn] = flow.bounds(cell);
+    if (u[i] < turn) {
+      const double Se = W[i] / flow.fillable(cell);
+      const double next = flow.table(cell).u_of_saturation(Se);
+      const double floor = driest + 0.1 * (u[i] - driest);
+      u_trial[i] = std::clamp(next, floor, std::max(entry, u[i]));
     } else {
       const double change = (u[i] - u_before[i]) * ratio;
       double next = u[i] + std::clamp(change, -kLargestExtrapolation, kLargestExtrapolation);
-      if ((u[i] < table.entry()) != (next < table.entry())) next = u[i];
+      if ((u[i] < entry) != (next < entry)) next = u[i];
       u_trial[i] = next;
     }
   }
@@ -136,7 +137,7 @@ int Integrator::Impl::solve_step(N_Vector correction) {
   double* out = data(correction);
   for (std::size_t i = 0; i < n; ++i) out[i] = flow.storage(static_cast<int>(i)) - W[i];
   const double* total_rate = data(Wp_pred) + n;
-  for (std::size_t k = 0; k < m; ++k) out[n + k] = (flow.patch_outflow()[k] - total_rate[k]) / c;
+  for (std::size_t k = 0; k < m; ++k) out[n + k] = (flow.totals()[k] - total_rate[k]) / c;
   return SUN_NLS_SUCCESS;
 }
 
@@ -163,7 +164,7 @@ void Integrator::Impl::fail_because(const std::string& cause) const {
     const double last = std::isfinite(u_trial[i]) ? u_trial[i] : u[i];
     cells.push_back({static_cast<int>(i),
                      {},
-                     flow.table().head_of_u(last),
+                     flow.head_of_u(static_cast<int>(i), last),
                      std::isnan(size) ? std::numeric_limits<double>::infinity() : size});
   }
   const auto count = static_cast<std::ptrdiff_t>(std::min<std::size_t>(5, n));
@@ -177,7 +178,7 @@ Integrator::Integrator(FlowSystem& flow, double theta_tolerance)
     : impl_(std::make_unique<Impl>(flow, theta_tolerance)) {}
 Integrator::~Integrator() = default;
 
-void Integrator::start(double t, std::span<const double> u) {
+void Integrator::start(double t, std::span<const double> u, double first_step) {
   Impl& s = *impl_;
   s.error = nullptr;
   s.steps_in_leg = 0;
@@ -195,13 +196,14 @@ void Integrator::start(double t, std::span<const double> u) {
     y[i] = s.flow.storage(static_cast<int>(i));
     yp[i] = -out[i] / s.flow.volume()[i];
   }
-  for (std::size_t k = 0; k < s.m; ++k) y[s.n + k] = 0.0, yp[s.n + k] = s.flow.patch_outflow()[k];
+  for (std::size_t k = 0; k < s.m; ++k) y[s.n + k] = 0.0, yp[s.n + k] = s.flow.totals()[k];
   if (s.initialised) {
     s.earlier = statistics();
     s.check(IDAReInit(s.ida.get(), t, s.y.get(), s.yp.get()), "IDAReInit");
   } else {
     s.make_ida();
   }
+  s.check(IDASetInitStep(s.ida.get(), first_step), "IDASetInitStep");
 }
 
 double Integrator::step(double stop) {
@@ -237,7 +239,8 @@ double Integrator::stored_at(double t) const {
   s.check(IDAGetDky(s.ida.get(), t, 0, s.work.get()), "IDAGetDky");
   const double* W = s.data(s.work.get());
   double sum = 0.0;
-  for (std::size_t i = 0; i < s.n; ++i) sum += s.flow.volume()[i] * W[i];
+  for (int i = 0; i < s.flow.cells(); ++i)
+    sum += s.flow.volume()[static_cast<std::size_t>(i)] * W[i];
   return sum;
 }
 

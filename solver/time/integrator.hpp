@@ -1,10 +1,11 @@
 #pragma once
 /// Time integration of the flow equation by IDA (SUNDIALS), variable-order BDF.
 ///
-/// IDA's unknowns are the storage W of each cell and, behind them, the cumulative outflow
-/// through each boundary patch; the pressure head is not among them. Each implicit step is
-/// solved by SwitchedNewton, given to IDA as its nonlinear solver: the unknown u lives here,
-/// is committed after each accepted step and never extrapolated by IDA.
+/// IDA's unknowns are the storage W of each cell and pond and, behind them, the totals of the flow
+/// system: the cumulative outflow through each boundary patch, supply and evaporation of each pond;
+/// the pressure head is not among them. Each implicit step is solved by SwitchedNewton, given to
+/// IDA as its nonlinear solver: the unknown u lives here, is committed after each accepted step and
+/// never extrapolated by IDA.
 ///
 /// Choices that matter:
 ///  - the error test sees W only; totals carry no weight;
@@ -35,7 +36,8 @@ class Integrator {
   Integrator& operator=(const Integrator&) = delete;
 
   /// Begins at time t [s] from unknowns u [m]; totals start from 0.
-  void start(double t, std::span<const double> u);
+  /// @param first_step length of the first step tried [s]; 0: found from the rates
+  void start(double t, std::span<const double> u, double first_step = 0.0);
   /// One accepted step, not beyond `stop`. @return the time reached
   /// @throws SolverFailure when it cannot, or after 20000 steps since the start
   double step(double stop);
@@ -43,11 +45,12 @@ class Integrator {
   double time() const;
   double last_step() const;
   std::span<const double> u() const;
-  /// Cumulative outflow [m3] and outflow [m3/s] of each patch at t within the last step.
+  /// Totals of the flow system since the start [m3] and their rates [m3/s] at t within the last
+  /// step.
   void totals_at(double t, std::span<double> volumes, std::span<double> flows) const;
   /// Water stored in all cells at t within the last step [m3].
   double stored_at(double t) const;
-  /// Storage W of each cell at t within the last step [-].
+  /// Storage W of each cell and pond at t within the last step [-].
   void storage_at(double t, std::span<double> W) const;
   /// Unknowns at t within the last step, linear between its ends.
   void u_at(double t, std::span<double> u) const;

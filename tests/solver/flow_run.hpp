@@ -25,13 +25,14 @@ struct FlowRun {
 };
 
 inline std::vector<double> uniform_state(const FlowSystem& flow, double head) {
-  return std::vector<double>(static_cast<std::size_t>(flow.cells()), flow.table().u_of_head(head));
+  return std::vector<double>(static_cast<std::size_t>(flow.cells()), flow.table(0).u_of_head(head));
 }
 
 /// Water in the ground above the residual content [m3].
 inline double stored_water(FlowSystem& flow, std::span<const double> u) {
   double sum = 0.0;
-  for (std::size_t i = 0; i < u.size(); ++i) sum += flow.volume()[i] * flow.storage_of_u(u[i]);
+  for (std::size_t i = 0; i < u.size(); ++i)
+    sum += flow.volume()[i] * flow.storage_of_u(static_cast<int>(i), u[i]);
   return sum;
 }
 

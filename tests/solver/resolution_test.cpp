@@ -3,6 +3,7 @@
 #include <catch2/catch.hpp>
 #include <cmath>
 
+#include "models/soil/capillary_length.hpp"
 #include "models/soil/catalogue.hpp"
 #include "solver/domain.hpp"
 
@@ -87,4 +88,113 @@ TEST_CASE("the ground of a longer test reaches farther, and below the wall", "[s
   CHECK(sixteen_hours.depth > four_hours.depth);
   CHECK(four_hours.depth > setup.ring.insertion + kLambda);
   CHECK(steady_domain(setup.ring, 0.25).radius > steady_domain(setup.ring, 0.05).radius);
+}
+
+namespace {
+
+models::Layer layer_of(const std::string& texture, double top) {
+  models::Layer layer;
+  layer.top = top;
+  layer.soil = models::make_soil(models::published_soils_of(texture).front());
+  layer.initial_head = -3.0;
+  return layer;
+}
+
+}  // namespace
+
+TEST_CASE("the outer ring asks for cells of its own", "[solver]") {
+  TestSetup setup = loam(0.15, 0.10);
+  const double alone = resolution_for(setup, 0.01, kLambda, 720.0).tip_cell;
+  setup.outer_ring = models::SingleRing{0.30, 0.10};
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell < alone);
+  setup.outer_ring->insertion = 0.01;
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell <= 0.005);
+  setup.outer_ring = models::SingleRing{0.17, 0.10};
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell < 0.0051);  // a quarter of 2 cm
+}
+
+TEST_CASE("an inner ring that divides nothing asks for nothing", "[solver]") {
+  TestSetup setup = loam(0.15, 0.0);
+  setup.outer_ring = models::SingleRing{0.30, 0.10};
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell ==
+        resolution_for(loam(0.30, 0.10), 0.01, kLambda, 720.0).tip_cell);
+  setup.outer_program.stages = {models::Stage{.head = 0.2, .duration = 3600.0}};
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell <= setup.ring.wall / 2);
+}
+
+TEST_CASE("what lies close to a foot is resolved", "[solver]") {
+  const double plain = resolution_for(loam(0.15, 0.05), 0.01, kLambda, 720.0).tip_cell;
+  TestSetup setup = loam(0.15, 0.05);
+  SECTION("a layer just below it") {
+    setup.layers_below = {layer_of("sand", 0.055)};
+    CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell <= 0.0025);
+  }
+  SECTION("disturbed soil") {
+    setup.disturbed = models::DisturbedSoil{0.006, 3.0};
+    CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell <= 0.003);
+  }
+  SECTION("a layer whose top is at the foot needs nothing more") {
+    setup.layers_below = {layer_of("loam", 0.05)};
+    CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell == plain);
+  }
+}
+
+TEST_CASE("a coarse layer near the foot asks for cells fit for its capillary length", "[solver]") {
+  TestSetup setup = loam(0.5, 0.2);
+  setup.layers_below = {layer_of("sand", 0.4)};
+  const double lambda = models::capillary_length(*setup.layers_below[0].soil.curves);
+  REQUIRE(lambda < kLambda);
+  CHECK(resolution_for(setup, 0.05, kLambda, 720.0).tip_cell <= lambda / 2);
+  setup.layers_below[0].top = 10.0;
+  CHECK(resolution_for(setup, 0.05, kLambda, 720.0).tip_cell ==
+        resolution_for(loam(0.5, 0.2), 0.05, kLambda, 720.0).tip_cell);
+}
+
+// An anisotropic problem is the isotropic one in r / sqrt(Kr / Kz).
+TEST_CASE("anisotropic soil: the resolution of the stretched ring", "[solver]") {
+  TestSetup setup = loam(0.20, 0.05);
+  setup.soil.anisotropy = 4.0;
+  CHECK(resolution_for(setup, 0.01, kLambda, 720.0).tip_cell ==
+        Approx(resolution_for(loam(0.10, 0.05), 0.01, kLambda, 720.0).tip_cell).epsilon(1e-12));
+}
+
+TEST_CASE("the ground fits the larger ring, the deeper foot, the larger head", "[solver]") {
+  TestSetup setup = loam(0.15, 0.05);
+  const Domain single = transient_domain(setup, kLambda);
+  setup.outer_ring = models::SingleRing{0.30, 0.15};
+  const Domain larger = transient_domain(setup, kLambda);
+  CHECK(larger.radius == Approx(single.radius + 0.15));
+  CHECK(larger.depth == Approx(single.depth + 0.10));
+  setup.outer_program.stages = {models::Stage{.head = 0.2, .duration = 3600.0}};
+  CHECK(largest_head(setup) == 0.2);
+  CHECK(transient_domain(setup, kLambda).radius > larger.radius);
+}
+
+TEST_CASE("layers widen the ground only if they can be reached", "[solver]") {
+  TestSetup setup = loam(0.15, 0.05);
+  const Domain uniform = transient_domain(setup, kLambda);
+  setup.layers_below = {layer_of("sand", 0.5)};
+  CHECK(transient_domain(setup, kLambda).depth > uniform.depth);
+  setup.layers_below = {layer_of("sand", uniform.depth + 0.1)};
+  CHECK(transient_domain(setup, kLambda).depth == uniform.depth);
+  setup.layers_below.clear();
+  setup.soil.anisotropy = 4.0;
+  CHECK(transient_domain(setup, kLambda).radius - 0.15 ==
+        Approx(2 * (uniform.radius - 0.15)).epsilon(1e-12));
+}
+
+TEST_CASE("with a water table the ground reaches well below it", "[solver]") {
+  TestSetup setup = loam(0.15, 0.05);
+  setup.water_table = 1.0;
+  const Domain domain = transient_domain(setup, kLambda);
+  CHECK(domain.depth > 1.0 + 10 * 0.15);
+  CHECK(steady_domain(setup, kLambda).depth == domain.depth);
+  setup.water_table = 0.0;  // saturated to the surface: nothing left to fill, still finite
+  CHECK(std::isfinite(transient_domain(setup, kLambda).radius));
+}
+
+TEST_CASE("the steady ground of the simplest test is that of its ring", "[solver]") {
+  const TestSetup setup = loam(0.15, 0.05);
+  CHECK(steady_domain(setup, kLambda).radius == steady_domain(setup.ring, kLambda).radius);
+  CHECK(steady_domain(setup, kLambda).depth == steady_domain(setup.ring, kLambda).depth);
 }

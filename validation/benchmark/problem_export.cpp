@@ -50,6 +50,7 @@ const char* kind_name(solver::Boundary kind) {
       return "seepage";
     case solver::Boundary::free_drainage:
       return "free drainage";
+    case solver::Boundary::pond:
     case solver::Boundary::flux:
     case solver::Boundary::closed:
       break;
@@ -58,7 +59,9 @@ const char* kind_name(solver::Boundary kind) {
 }
 
 json boundary_json(const solver::CellsAndFaces& mesh, double pond_head, double lambda) {
-  const auto conditions = solver::ring_conditions(mesh, pond_head);
+  auto conditions = solver::ground_conditions(mesh, {});
+  conditions[solver::ring_patches(mesh).ring] =
+      solver::Condition::constant(solver::Boundary::head, pond_head);
   json j = json::array();
   for (const solver::BoundaryFace& f : mesh.boundary) {
     const auto& condition = conditions[static_cast<std::size_t>(f.patch)];

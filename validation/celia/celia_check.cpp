@@ -46,7 +46,7 @@ TEST_CASE("dry sand between two suctions: intake, fronts, flux, no water lost", 
   const std::vector<double> u = uniform_state(flow, -10.0);
   const double before = stored_water(flow, u);
   const FlowRun r = run_flow(flow, 1e-5, u, times);
-  const auto head = [&](double x) { return flow.table().head_of_u(x); };
+  const auto head = [&](double x) { return flow.table(0).head_of_u(x); };
   for (std::size_t i = 0; i < rows.size(); ++i) {
     const FlowRecord& at = r.records[i];
     CAPTURE(rows[i].time);

@@ -78,7 +78,7 @@ TEST_CASE("sand under rain of 13.69 cm/h: depth of the front", "[column]") {
   const std::vector<double> times{0.1 * hour, 0.2 * hour, 0.4 * hour, 0.8 * hour};
   const std::vector<double> depth{8.068, 16.421, 32.750, 65.136};  // of theta = 0.20 [cm]
   const FlowRun r = run_flow(flow, 1e-5, uniform_state(flow, -0.615), times);
-  const auto theta = [&](double u) { return soil.theta_r + flow.storage_of_u(u); };
+  const auto theta = [&](double u) { return soil.theta_r + flow.storage_of_u(0, u); };
   for (std::size_t i = 0; i < times.size(); ++i) {
     CAPTURE(times[i]);
     CHECK(validation::depth_of(mesh, r.records[i].u, 0.20, theta) / cm ==
@@ -86,7 +86,7 @@ TEST_CASE("sand under rain of 13.69 cm/h: depth of the front", "[column]") {
   }
   // at the surface the flux is carried by gravity alone: K(h) = 13.69 cm/h
   CHECK(theta(r.records[3].u[0]) == Approx(0.267426).epsilon(kUncertainty));
-  CHECK(flow.table().head_of_u(r.records[3].u[0]) / cm == Approx(-20.74).epsilon(kUncertainty));
+  CHECK(flow.table(0).head_of_u(r.records[3].u[0]) / cm == Approx(-20.74).epsilon(kUncertainty));
 }
 
 // Heads at both ends as in Celia et al. 1990, Water Resour. Res. 26:1483.
@@ -104,7 +104,7 @@ TEST_CASE("sand between two heads: intake and depth of h = -40 cm", "[column]") 
     CAPTURE(times[i]);
     CHECK(-r.records[i].volumes[0] / cm == Approx(intake[i]).epsilon(kUncertainty));
     CHECK(validation::depth_of(mesh, r.records[i].u, -0.40,
-                               [&](double u) { return flow.table().head_of_u(u); }) /
+                               [&](double u) { return flow.table(0).head_of_u(u); }) /
               cm ==
           Approx(depth[i]).epsilon(kUncertainty));
   }

@@ -84,7 +84,7 @@ Differences differences(FlowSystem& flow, std::vector<double> u) {
   Differences d{Eigen::MatrixXd(flow.cells(), flow.cells()), Eigen::VectorXd(flow.cells())};
   std::vector<double> up(n), down(n);
   for (std::size_t j = 0; j < n; ++j) {
-    const double old = u[j], e = 1e-5 * std::min(1.0, old - flow.table().driest());
+    const double old = u[j], e = 1e-5 * std::min(1.0, old - flow.table(0).driest());
     u[j] = old + e;
     flow.set_state(u);
     flow.net_outflow(up);
@@ -251,19 +251,15 @@ TEST_CASE("storage: fillable part of theta and specific storage above zero head"
   soil.specific_storage = 1e-3;
   FlowSystem flow(column_mesh({0.0, -0.1, -0.2}), soil, std::make_shared<CurveTable>(soil.curves),
                   {{}, {}});
-  flow.set_state(std::vector<double>{flow.table().u_of_head(-0.2), 0.5});
+  flow.set_state(std::vector<double>{flow.table(0).u_of_head(-0.2), 0.5});
   CHECK(flow.storage(0) == Approx(0.35 * std::exp(-1.0)).epsilon(1e-6));
   CHECK(flow.storage(1) == Approx(0.35 + 5e-4).epsilon(1e-12));
   CHECK(flow.storage_slope(1) == Approx(1e-3));
-  CHECK(flow.fillable() == Approx(0.35));
+  CHECK(flow.fillable(0) == Approx(0.35));
 }
 
 TEST_CASE("one condition per patch is asked for", "[solver][flow]") {
   const models::Soil soil = gardner_soil(5.0);
   const auto table = std::make_shared<CurveTable>(soil.curves);
   CHECK_THROWS_AS(FlowSystem(small_ring(), soil, table, {{}, {}}), std::invalid_argument);
-  CellsAndFaces layered = small_ring();
-  layered.soil.back() = 1;  // across two materials the Kirchhoff difference would be wrong
-  CHECK_THROWS_AS(FlowSystem(layered, soil, table, std::vector<Condition>(layered.patches.size())),
-                  std::invalid_argument);
 }

@@ -14,7 +14,7 @@ namespace {
 
 SteadyResult solve_column(FlowSystem& flow, double first_head) {
   std::vector<double> Phi(static_cast<std::size_t>(flow.cells()),
-                          flow.table().potential_of_head(first_head));
+                          flow.table(0).potential_of_head(first_head));
   return solve_steady(flow, Phi);
 }
 

@@ -22,7 +22,7 @@ struct EulerStep {
             int cells = 40)
       : flow(column_mesh(equal_edges(0.0, -0.4, cells)), soil,
              std::make_shared<CurveTable>(soil.curves), std::move(conditions)),
-        W(static_cast<std::size_t>(cells), flow.storage_of_u(flow.table().u_of_head(head))),
+        W(static_cast<std::size_t>(cells), flow.storage_of_u(0, flow.table(0).u_of_head(head))),
         W_rate(W.size(), 0.0) {}
 
   double balance(double c) {  // storage gained over outflow in the step, relative
@@ -46,7 +46,7 @@ TEST_CASE("Newton finds the same step from good and from poor guesses", "[solver
       const double fill = soil.theta_s - soil.theta_r;
       const double c = soil.Ks / (0.02 * fill);  // the front moves some two centimetres
       EulerStep s(soil, {pond, drain}, head);
-      const CurveTable& table = s.flow.table();
+      const CurveTable& table = s.flow.table(0);
       std::vector<double> answer;
       for (double guess : {head, -0.2, -0.001, 0.3, 5.0, -1000.0}) {
         CAPTURE(texture, head, guess);

@@ -181,3 +181,42 @@ TEST_CASE("without gravity the body keeps its volumes and loses its heights", "[
   }
   for (const BoundaryFace& b : flat.boundary) CHECK((b.rise == 0.0 && b.normal_down == 0.0));
 }
+
+// Resistance of the part of a ring between two radii: ln(outer / inner); of a plane slab: its
+// thickness.
+TEST_CASE("faces know which part of the resistance lies on either side", "[solver][mesh]") {
+  const Grid g;
+  const CellsAndFaces m =
+      axisymmetric_mesh(g.radii, g.elevations, {{0.10, 0.05, true}}, {"ring", "outside"});
+  for (const Face& f : m.faces) {
+    const auto& a = m.drawing.centres[static_cast<std::size_t>(f.a)];
+    const auto& b = m.drawing.centres[static_cast<std::size_t>(f.b)];
+    CAPTURE(a[0], a[1], b[0], b[1]);
+    CHECK(f.horizontal == (f.rise == 0.0));
+    if (f.rise > 0.0) {  // below a lies b, between them an edge
+      const double edge = *std::find_if(g.elevations.begin(), g.elevations.end(),
+                                        [&](double z) { return z < a[1]; });
+      CHECK(f.part_a == Approx((a[1] - edge) / (a[1] - b[1])).epsilon(1e-12));
+    } else {
+      const double edge =
+          *std::find_if(g.radii.begin(), g.radii.end(), [&](double r) { return r > a[0]; });
+      CHECK(f.part_a == Approx(std::log(edge / a[0]) / std::log(b[0] / a[0])).epsilon(1e-12));
+    }
+  }
+  const CellsAndFaces plane = plane_mesh({0.0, 1.0, 4.0}, {0.0, -1.0});
+  REQUIRE(plane.faces.size() == 1);
+  CHECK(plane.faces[0].part_a == Approx(0.5 / 2.0).epsilon(1e-12));
+}
+
+TEST_CASE("a wall may go without the correction", "[solver][mesh]") {
+  const Grid g;
+  const CellsAndFaces open = axisymmetric_mesh(g.radii, g.elevations, {}, {"top"});
+  for (double depth : {0.0, 0.05}) {
+    const CellsAndFaces m = axisymmetric_mesh(
+        g.radii, g.elevations, {{.radius = 0.10, .depth = depth, .corrected = false}},
+        {"ring", "outside"});
+    CHECK(area_of(m, "ring") == Approx(pi * 0.1 * 0.1).epsilon(1e-13));
+    for (const Face& f : m.faces)
+      CHECK(f.transmissibility == face_between(open, f.a, f.b)->transmissibility);
+  }
+}
