@@ -53,6 +53,7 @@ struct Test {
   double vessel_diameter = 0.0;    ///< of standpipe or tank [m]
   double evaporation = 0.0;        ///< of open water [m/s]
   std::optional<models::Lid> lid;  ///< on the (inner) ring
+  double ballast_factor = 1.5;     ///< on the lift of the lid [-]
   std::optional<double>
       sealed_volume;  ///< of a closed inner ring whose flow is read by volume [m3]
   Reader reader;

@@ -45,6 +45,14 @@ void read_strength(const SectionReader& section, models::Lid& lid, Reading& read
     reading.assume(section.path_of("seal"), "lid sealed at the ring's inner diameter");
 }
 
+void read_ballast_factor(const SectionReader& section, Test& test, Reading& reading) {
+  if (section.is_broken()) return;
+  test.ballast_factor = section.quantity("ballast factor").value_or(test.ballast_factor);
+  if (!section.has("ballast factor"))
+    reading.assume(section.path_of("ballast factor"),
+                   fmt::format("ballast of {:g} times the lift", test.ballast_factor));
+}
+
 void check_seal(const SectionReader& section, const SectionReader& lid, const Test& test,
                 Reading& reading) {
   if (!test.lid->seal_radius || *test.lid->seal_radius >= test.ring.radius - 1e-9) return;
@@ -126,6 +134,7 @@ void read_lid(const SectionReader& section, Test& test, Reading& reading) {
       read_strength(lid, words, reading);
     }
     test.lid = words;
+    read_ballast_factor(lid, test, reading);
     if (!lid.is_broken()) check_seal(section, lid, test, reading);
   } else if (!section.is_suggested("lid")) {
     refuse_without_lid(section, reading);

@@ -53,6 +53,11 @@ Key lid_grammar() {
        .examples = {"12 kg"},
        .dimension = Dimension::mass,
        .range = Range{0.0, 5000.0, "0 kg to 5000 kg"}},
+      {.name = "ballast factor",
+       .kind = ValueKind::number,
+       .meaning = "Ballast over lift that is asked for; 1.5 if not given.",
+       .examples = {"1.5"},
+       .range = Range{1.0, 10.0, "1 to 10"}},
   };
   return section;
 }
