@@ -74,6 +74,8 @@ std::string rest(const Ground& ground) {
                     depth(ground.disturbed->width), ground.disturbed->factor));
   if (ground.gap) add(fmt::format("a gap of {:g} mm along the walls", 1e3 * ground.gap->width));
   if (ground.liner) add(fmt::format("liner {} thick", depth(*ground.liner)));
+  if (ground.wet_density)
+    add(fmt::format("ground of {:.4g} kg/m3 with its water", *ground.wet_density));
   if (!ground.truth_layer.empty()) add(fmt::format("true Kfs is that of {}", ground.truth_layer));
   return text;
 }

@@ -45,8 +45,9 @@ struct Ground {
   std::optional<double> water_table;      ///< depth [m]
   std::optional<models::DisturbedSoil> disturbed;
   std::optional<models::WallGap> gap;
-  std::optional<double> liner;  ///< thickness of a liner from the test level down [m]
-  std::string truth_layer;      ///< whose Kfs is the true one; empty: that holding the wall's foot
+  std::optional<double> liner;        ///< thickness of a liner from the test level down [m]
+  std::optional<double> wet_density;  ///< of the ground with its water [kg/m3]
+  std::string truth_layer;  ///< whose Kfs is the true one; empty: that holding the wall's foot
 };
 
 /// Initial pressure head [m] of a variant under a moisture; of a hydrostatic state that at the

@@ -95,6 +95,7 @@ Ground read_ground(const LocatedNode& node, const Place& where, const Key& gramm
   take_uppermost(paired(section, below_test_level(std::move(layers)), reading), ground);
   check_surface(section, ground, context, reading);
   read_walls(section, ground);
+  ground.wet_density = section.quantity("wet density");
   ground.liner = section.quantity("liner");
   if (ground.liner) places.liner = section.value_place("liner");
   read_truth(section, ground, places, reading);

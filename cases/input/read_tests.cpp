@@ -46,6 +46,8 @@ Test read_test(const LocatedNode::Entry& entry, const Key& grammar, const Sectio
   check_depth(section, "insert", test.ring.insertion, ground, reading);
   if (test.outer_ring)
     check_depth(section, "outer insert", test.outer_ring->insertion, ground, reading);
+  if (test.lid && !ground.ground.wet_density)
+    reading.assume("ground.wet density", "ground as heavy as grains of 2650 kg/m3 with full pores");
   read_protocol({section, common}, heads, test, reading);
   return test;
 }

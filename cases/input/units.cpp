@@ -57,6 +57,8 @@ Kind kind_of(Dimension dimension) {
       return {"a flow", "2 L/min", "m3/s"};
     case Dimension::mass:
       return {"a mass", "12 kg", "kg"};
+    case Dimension::density:
+      return {"a density", "1.9 kg/L", "kg/m3"};
   }
   throw std::logic_error("a dimension without a name");
 }

@@ -26,6 +26,7 @@ enum class Dimension {
   volume,                  ///< [m3]
   flow,                    ///< [m3/s]
   mass,                    ///< [kg]
+  density,                 ///< [kg/m3]
 };
 
 /// "a length", for messages.

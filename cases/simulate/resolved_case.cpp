@@ -50,6 +50,7 @@ void add_place(const Ground& ground, json& result) {
                            {"Ks_factor", ground.disturbed->factor}};
   if (ground.gap) result["wall_gap"] = with_unit(ground.gap->width, "m");
   if (ground.liner) result["liner"] = with_unit(*ground.liner, "m");
+  if (ground.wet_density) result["wet_density"] = with_unit(*ground.wet_density, "kg/m3");
   if (!ground.truth_layer.empty()) result["true_Kfs_of"] = ground.truth_layer;
 }
 

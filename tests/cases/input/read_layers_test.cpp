@@ -104,12 +104,13 @@ TEST_CASE("a hydrostatic state without a water table", "[layers]") {
 TEST_CASE("what driving the ring does, and anisotropy", "[layers]") {
   const Case what = case_of(
       "  texture: loam, moist\n  Kr over Kz: 3\n  disturbed: { width: 1 cm, Ks x: 0.3 }\n"
-      "  wall gap: 0.2 mm\n");
+      "  wall gap: 0.2 mm\n  wet density: 1.9 g/cm3\n");
   const auto setup = setup_of(what, 0);
   CHECK(setup.soil.anisotropy == Approx(3));
   CHECK(setup.disturbed->width == Approx(0.01));
   CHECK(setup.disturbed->factor == Approx(0.3));
   CHECK(setup.gap->width == Approx(2e-4));
+  CHECK(what.ground.wet_density.value() == Approx(1900));
 }
 
 TEST_CASE("the true Kfs may be that of a named layer", "[layers]") {

@@ -143,4 +143,16 @@ TEST_CASE("numbers that a YAML reader would take for others are refused") {
   CHECK(scan_number("30 inch").rest == "inch");
 }
 
+TEST_CASE("a time may have two parts, and masses and densities are known") {
+  const Units units;
+  CHECK(units.read("1 h 10 min", Dimension::time) == Approx(4200));
+  CHECK(units.read("1 d 2 h 3 min 4 s", Dimension::time) == Approx(86400 + 7200 + 180 + 4));
+  CHECK_THROWS_AS(units.read("1 h 10", Dimension::time), ValueError);
+  CHECK_THROWS_AS(units.read("1 h 10 cm", Dimension::time), ValueError);
+  CHECK_THROWS_AS(units.read("1 m 10 cm", Dimension::length), ValueError);
+  // The pound is 0.45359237 kg by definition (international yard and pound agreement, 1959).
+  CHECK(units.read("10 lb", Dimension::mass) == Approx(4.5359237));
+  CHECK(units.read("1.9 g/cm3", Dimension::density) == Approx(1900));
+}
+
 }  // namespace ringwright::cases
