@@ -1,6 +1,7 @@
 #include "cases/simulate/question.hpp"
 
 #include <algorithm>
+#include <cstdint>
 
 #include "cases/simulate/pond_programs.hpp"
 #include "models/water/viscosity.hpp"
@@ -33,6 +34,44 @@ void add_ground(const Ground& ground, std::size_t variant, double viscosity_rati
   setup.gap = ground.gap;
 }
 
+models::Gauge gauge_of(const Test& test) {
+  models::Gauge gauge;
+  gauge.volume_division = test.reader.volume_division;
+  gauge.random_error = test.reader.random_error;
+  gauge.head_division = test.ruler;
+  gauge.head_tolerance = test.head_kept;
+  gauge.seed = static_cast<std::uint64_t>(test.reader.seed);
+  return gauge;
+}
+
+// The rule that governs comes first; without one the test ends at its time, counted after the soak.
+std::vector<models::StopRule> rules_of(const Test& test) {
+  std::vector<models::StopRule> rules;
+  if (test.rule) rules.push_back(*test.rule);
+  if (test.also_judge.empty()) return rules;
+  if (!test.rule) {
+    models::StopRule end;
+    end.kind = models::StopKind::after_time;
+    end.time = test.protocol.longest;
+    for (const models::Stage& stage : test.program.stages)
+      if (stage.soak) end.time -= stage.duration;
+    rules.push_back(end);
+  }
+  rules.insert(rules.end(), test.also_judge.begin(), test.also_judge.end());
+  return rules;
+}
+
+postprocess::Circumstances circumstances_of(const Test& test, const Ground& ground) {
+  postprocess::Circumstances circumstances;
+  circumstances.lid = test.lid;
+  circumstances.liner = ground.liner;
+  circumstances.bulk_density = ground.wet_density;
+  circumstances.sealed_volume = test.sealed_volume;
+  circumstances.water_temperature = ground.water_temperature;
+  circumstances.ballast_factor = test.ballast_factor;
+  return circumstances;
+}
+
 }  // namespace
 
 postprocess::Question question_of(const Test& test, const Ground& ground,
@@ -46,7 +85,8 @@ postprocess::Question question_of(const Test& test, const Ground& ground,
   setup.ring = test.ring;
   setup.pond_head = protocol.head;
   setup.duration = protocol.longest;
-  add_ground(ground, variant_index(ground, variant), question.viscosity_ratio, setup);
+  const std::size_t index = variant_index(ground, variant);
+  add_ground(ground, index, question.viscosity_ratio, setup);
   setup.outer_ring = test.outer_ring;
   setup.program = pond_program(test);
   setup.outer_program = outer_pond_program(test);
@@ -56,6 +96,9 @@ postprocess::Question question_of(const Test& test, const Ground& ground,
     question.stop_readings = protocol.stop->readings;
     question.stop_within = protocol.stop->within;
   }
+  question.gauge = gauge_of(test);
+  question.rules = rules_of(test);
+  question.circumstances = circumstances_of(test, ground);
   question.assumed_alpha_star = test.assumed_alpha_star;
   question.accuracy = accuracy;
   question.threads = threads;

@@ -86,6 +86,28 @@ TEST_CASE("a tank beside the ring moves with it from the soil up", "[question]")
   CHECK(vessel->base_head == 0.0);
 }
 
+TEST_CASE("gauge, rules and circumstances are asked as the case says", "[question]") {
+  const auto question = question_of(case_of(
+      "head: 8 cm, pressure: 40 cm, gauge: 2 mL, reading error: 1 mL, seed: 9, "
+      "lid: { relief: 1 m, rating: 20 kPa, weight: 12 kg, ballast factor: 2 }, "
+      "soak: 48 cm for 30 min, stop: after 2 h, also judge: [after 1 h, 3 readings within 5 %]"));
+  CHECK(question.gauge.volume_division == Approx(2e-6));
+  CHECK(question.gauge.random_error == Approx(1e-6));
+  CHECK(question.gauge.head_division == Approx(1e-3));
+  CHECK(question.gauge.head_tolerance == Approx(5e-3));
+  CHECK(question.gauge.seed == 9);
+  // The end of the test governs; rules count from the end of the soak.
+  REQUIRE(question.rules.size() == 3);
+  CHECK(question.rules[0].kind == models::StopKind::after_time);
+  CHECK(question.rules[0].time == Approx(7200));
+  CHECK(question.setup.duration == Approx(9000));
+  CHECK(question.rules[2].kind == models::StopKind::change_within_share);
+  CHECK(question.circumstances.lid->weight == Approx(12));
+  CHECK(question.circumstances.ballast_factor == Approx(2));
+  CHECK_FALSE(question.circumstances.sealed_volume);
+  CHECK(question_of(case_of("head: 8 cm, stop: after 2 h")).rules.empty());
+}
+
 TEST_CASE("the resolved case holds programs, rings and layers in SI", "[question]") {
   const auto json = resolved_case(case_of(
       "outer ring: 40 cm, heads: 5 cm then 15 cm, soak: 5 cm for 30 min, stop: after 20 L"));
