@@ -43,9 +43,11 @@ struct Question {
   std::vector<models::StopRule> rules;  ///< the first governs the test, all are judged; empty: the
                                         ///< rule of the next two fields
   int stop_readings = 0;                ///< stop rule: last n readings ...
-  double stop_within = 0.0;       ///< ... within this fraction of their mean; 0 readings: no rule
-  double assumed_alpha_star = 0;  ///< the crew's alpha* [1/m]
-  double viscosity_ratio = 1.0;   ///< mu(test temperature) / mu(20 degC): K20 = K * ratio
+  double stop_within = 0.0;        ///< ... within this fraction of their mean; 0 readings: no rule
+  double assumed_alpha_star = 0;   ///< the crew's alpha* [1/m]
+  std::optional<double> true_Kfs;  ///< what readings are held against, at test temperature [m/s];
+                                   ///< none: Ks of the layer that holds the foot of the wall
+  double viscosity_ratio = 1.0;    ///< mu(test temperature) / mu(20 degC): K20 = K * ratio
   Circumstances circumstances = {};
   bool find_influence = true;  ///< whether the depth of influence is looked for (some coarse runs)
   double accuracy = 0.01;      ///< asked for, relative, every printed figure

@@ -3,15 +3,20 @@
 #include <algorithm>
 #include <cmath>
 #include <mutex>
-#include <numbers>
 
 #include "models/soil/capillary_length.hpp"
 #include "postprocess/reading/companion_runs.hpp"
-#include "postprocess/reading/ladder.hpp"
-#include "postprocess/reading/stop_rule.hpp"
-#include "postprocess/reading/test_times.hpp"
+#include "postprocess/reading/depth_of_influence.hpp"
+#include "postprocess/reading/flags/flags.hpp"
+#include "postprocess/reading/read_runs.hpp"
+#include "postprocess/reading/rule_verdicts.hpp"
+#include "postprocess/reading/test_plan.hpp"
+#include "postprocess/reading/test_record.hpp"
 #include "postprocess/reading/time_to_steady.hpp"
+#include "postprocess/reading/true_kfs.hpp"
+#include "postprocess/reading/water_use.hpp"
 #include "solver/flow/curve_table.hpp"
+#include "solver/ground_materials.hpp"
 #include "solver/resolution.hpp"
 
 namespace ringwright::postprocess {
@@ -23,60 +28,21 @@ constexpr double kMeshShare = 0.6;  // of the accuracy, aimed at for the mesh wh
 // The estimate is two to four times the error: begin finer than the accuracy needs, so that one
 // set of runs mostly does.
 constexpr double kBeginAt = 0.36;
-constexpr double kBeginTolerance = 0.5;
+// How a test with one head and one ring is refined, and one with more. In the Kfs of a pair and the
+// inner flow of a double ring, which are differences, errors count several times: those of the
+// cells at the foot of the wall most, those of time steps next.
+struct Manner {
+  double begin_tolerance, begin_cells, begin_tip;  // shares of what the accuracy would ask for
+  double least_cells;                              // share of the cell size kept in one round
+  double time_share, tolerance;  // above this share of the accuracy the tolerance falls to this
+};
+constexpr Manner kSimple{0.5, 1.0, 1.0, 0.4, 0.3, 0.3};
+constexpr Manner kMore{0.3, 0.8, 0.6, 0.55, 0.5, 0.4};
 constexpr int kMostCells = 40000;
 constexpr double kPeakInterval = 60.0;  // [s]
 constexpr int kSnapshots = 12;
 // Progress told: the pilot up to the first, the time to steady from the second.
 constexpr double kPilotShare = 0.05, kSteadyShare = 0.9;
-
-void add_times(std::vector<double>& times, const std::vector<double>& more) {
-  times.insert(times.end(), more.begin(), more.end());
-  std::sort(times.begin(), times.end());
-  const auto same = [](double a, double b) { return b - a <= 1e-9 * b; };
-  times.erase(std::unique(times.begin(), times.end(), same), times.end());
-}
-
-// Everything that any row may ask for: readings, stopping times, and one interval before each.
-std::vector<double> wanted_times(const Question& q) {
-  std::vector<double> times = reading_times(q.reading_interval, q.setup.duration);
-  for (double t : stopping_times(q.reading_interval, q.setup.duration)) {
-    times.push_back(t);
-    if (t > q.reading_interval * (1 + 1e-9)) times.push_back(t - q.reading_interval);
-  }
-  const double before_end = q.setup.duration - q.reading_interval;
-  if (before_end > 1e-9 * q.setup.duration) times.push_back(before_end);
-  times.push_back(std::min(kPeakInterval, q.setup.duration));
-  add_times(times, {});
-  return times;
-}
-
-models::Record record_of(const Question& q, const solver::TestRun& run) {
-  models::Record record;
-  record.ring_area = std::numbers::pi * q.setup.ring.radius * q.setup.ring.radius;
-  double before = 0.0, volume_before = 0.0;
-  for (double t : reading_times(q.reading_interval, q.setup.duration)) {
-    if (run.samples.empty() || t > run.samples.back().time * (1 + 1e-9)) break;
-    const double volume = volume_at(run, t);
-    record.readings.push_back({t, t - before, volume - volume_before, volume, q.setup.pond_head});
-    before = t;
-    volume_before = volume;
-  }
-  return record;
-}
-
-// The stop by the rule on a record; the last reading when the rule is never met.
-struct Stop {
-  std::size_t reading = 0;
-  bool rule_met = true;
-};
-
-Stop stop_of(const Question& q, const models::Record& record) {
-  const std::size_t last = record.readings.size() - 1;
-  if (q.stop_readings == 0) return {last, true};
-  const auto found = first_steady_reading(record, q.stop_readings, q.stop_within);
-  return {found.value_or(last), found.has_value()};
-}
 
 class Answering {
  public:
@@ -85,8 +51,10 @@ class Answering {
       : observer_(observer), table_(std::move(table)) {
     answer_.question = question;
     if (!table_) table_ = std::make_shared<solver::CurveTable>(question.setup.soil.curves);
+    materials_ = solver::ground_materials(question.setup, table_);
+    plan_ = plan_of(question);
     setup_ = question.setup;
-    setup_.times = wanted_times(question);
+    setup_.times = wanted_times(question, plan_);
     for (int k = 1; k <= kSnapshots; ++k)  // denser early, when the wetted body grows fastest
       setup_.snapshots.push_back(setup_.duration * (k * k) / (kSnapshots * kSnapshots));
   }
@@ -96,9 +64,12 @@ class Answering {
  private:
   double pilot_stop(const solver::Resolution& resolution);
   void run_until_accurate();
+  const Manner& manner() const;
+  void begin_finer(solver::Resolution& resolution) const;
   void refine(solver::Resolution& resolution) const;
-  void read();
   void describe_soil();
+  void finish();
+  void look_deeper();
   solver::StepObserver observe(double from, double to);
   bool report(double fraction);
 
@@ -108,6 +79,8 @@ class Answering {
   std::mutex observing_;
   double done_ = 0.0;  // told last [-]
   std::shared_ptr<const solver::CurveTable> table_;
+  std::vector<solver::Material> materials_;
+  TestPlan plan_;
   solver::TestSetup setup_;
   CompanionRuns runs_;
   WorstFigure worst_;
@@ -131,14 +104,15 @@ solver::StepObserver Answering::observe(double from, double to) {
 
 // A cheap run to learn when the rule would stop the test: that decides which figures are promised.
 double Answering::pilot_stop(const solver::Resolution& resolution) {
-  if (question().stop_readings == 0) return setup_.duration;
+  if (rules_of(question()).empty()) return setup_.duration;
   solver::TestSetup plain = setup_;
   plain.snapshots.clear();
   const solver::TestRun run =
-      solver::run_test(plain, resolution, table_, observe(0.0, kPilotShare));
+      solver::run_test(plain, resolution, materials_, observe(0.0, kPilotShare));
   if (run.interrupted) return setup_.duration;
-  const models::Record record = record_of(question(), run);
-  return record.readings[stop_of(question(), record).reading].time;
+  const models::Record record = record_as_read(question(), plan_, run);
+  if (record.readings.empty()) return setup_.duration;
+  return record.readings[stop_of(question(), plan_, record).reading].time;
 }
 
 void Answering::run_until_accurate() {
@@ -148,13 +122,14 @@ void Answering::run_until_accurate() {
   const double stop = pilot_stop(first_resolution_.coarser());
   add_times(setup_.snapshots, {stop});
   resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
-  resolution_.theta_tolerance *= kBeginTolerance;
+  begin_finer(resolution_);
   double from = kPilotShare;
   for (;; ++answer_.refinements) {
     // How many rounds there will be is not known: each takes half of what is left.
     const double to = from + 0.5 * (kSteadyShare - from);
-    CompanionRuns next = run_companions(setup_, resolution_, table_, question().threads,
-                                        observe(from, to), [this] { return report(0.0); });
+    CompanionRuns next =
+        run_companions({setup_, materials_, plan_.held_heads()}, resolution_, question().threads,
+                       observe(from, to), [this] { return report(0.0); });
     from = to;
     answer_.interrupted = next.interrupted;
     // An interrupted refinement leaves the complete set before it.
@@ -164,7 +139,8 @@ void Answering::run_until_accurate() {
     if (answer_.interrupted) return;
     const auto& s = runs_.fine.statistics;
     answer_.total_steps += s.steps + runs_.coarse.statistics.steps + runs_.loose.statistics.steps;
-    read();
+    worst_ = read_runs(plan_, runs_, answer_);
+    answer_.worst_relative_error = worst_.relative_error;
     answer_.accuracy_met = worst_.relative_error <= accuracy;
     if (answer_.accuracy_met || answer_.refinements == kMostRefinements || s.cells > kMostCells)
       return;
@@ -172,56 +148,80 @@ void Answering::run_until_accurate() {
   }
 }
 
+const Manner& Answering::manner() const {
+  return plan_.stages.size() == 1 && !setup_.outer_ring ? kSimple : kMore;
+}
+
+void Answering::begin_finer(solver::Resolution& resolution) const {
+  const Manner& m = manner();
+  resolution.theta_tolerance *= m.begin_tolerance;
+  if (m.begin_cells == 1.0) return;
+  const double top = resolution.top_cell;
+  resolution = resolution.scaled(m.begin_cells);
+  resolution.tip_cell *= m.begin_tip;
+  resolution.top_cell = std::min(top, 2 * resolution.tip_cell);
+}
+
 // Errors of the mesh fall about with the square of the cell size, those of time with the tolerance.
 void Answering::refine(solver::Resolution& resolution) const {
   const double accuracy = question().accuracy;
-  if (worst_.time_part > 0.3 * accuracy) resolution.theta_tolerance *= 0.3;
+  const Manner& m = manner();
+  if (worst_.time_part > m.time_share * accuracy) resolution.theta_tolerance *= m.tolerance;
   if (worst_.mesh_part > kMeshShare * accuracy)
     resolution = resolution.scaled(
-        std::clamp(std::sqrt(kMeshShare * accuracy / worst_.mesh_part), 0.4, 0.9));
-}
-
-void Answering::read() {
-  answer_.record = record_of(question(), runs_.fine);
-  const Stop stop = stop_of(question(), answer_.record);
-  answer_.stop_rule_met = stop.rule_met;
-  answer_.record.readings.resize(stop.reading + 1);
-  const Ladder ladder = make_ladder(question(), runs_, answer_.record.readings.back().time);
-  answer_.ladder = ladder.rows;
-  answer_.steady_rate = ladder.steady_rate;
-  answer_.steady_reads = ladder.steady_reads;
-  worst_ = ladder.worst;
-  answer_.worst_relative_error = worst_.relative_error;
+        std::clamp(std::sqrt(kMeshShare * accuracy / worst_.mesh_part), m.least_cells, 0.9));
 }
 
 void Answering::describe_soil() {
   const models::Soil& soil = setup_.soil;
-  const double h = setup_.initial_head;
+  const double h = solver::head_before(setup_, 0, 0.0);
   answer_.initial_water_content = soil.water_content(h);
   answer_.initial_saturation = soil.curves->saturation(h);
-  answer_.own_capillary_length = models::capillary_length(*soil.curves);
+  answer_.own_capillary_length = models::capillary_length(*foot_soil(setup_).curves);
+}
+
+// What does not belong to the promised figures and is found once.
+void Answering::finish() {
+  const double first = std::min(kPeakInterval, setup_.duration);
+  if (runs_.fine.samples.front().time <= first * (1 + 1e-9) &&
+      runs_.fine.samples.back().time >= first * (1 - 1e-9))
+    answer_.peak_flow = volume_at(runs_.fine, first) / first;
+  const std::size_t last = answer_.record.readings.size() - 1;
+  answer_.flags = raise_flags({.question = question(),
+                               .plan = plan_,
+                               .run = runs_.fine,
+                               .stop = stop_time(answer_),
+                               .rule_met = answer_.stop_rule_met,
+                               .above_steady = excess_of_reading(plan_, runs_, last).value});
+}
+
+// Runs of their own, coarser.
+void Answering::look_deeper() {
+  const auto going = [this] { return report(kSteadyShare); };
+  if (plan_.is_constant) {
+    const auto steady = time_to_steady(setup_, first_resolution_, materials_, going);
+    answer_.time_to_steady = steady.value_or(TimeToSteady{});
+    answer_.interrupted = answer_.interrupted || !steady;
+  }
+  if (question().find_influence && !answer_.interrupted)
+    answer_.influence = depth_of_influence(question().setup, stop_time(answer_),
+                                           answer_.wetted_depth.value, table_, going);
+  answer_.interrupted = answer_.interrupted || !going();
 }
 
 Answer Answering::run() {
   describe_soil();
-  answer_.filling_volume =
-      std::numbers::pi * setup_.ring.radius * setup_.ring.radius * setup_.pond_head;
+  answer_.filling_volume = filling_volume(setup_);
   run_until_accurate();
   if (answer_.interrupted &&
       answer_.refinements == 0) {  // interrupted before anything was complete
-    answer_.record = record_of(question(), runs_.fine);
-  } else {
-    answer_.peak_flow = volume_at(runs_.fine, std::min(kPeakInterval, setup_.duration)) /
-                        std::min(kPeakInterval, setup_.duration);
-    const double stop = answer_.record.readings.back().time;
-    answer_.wetted_depth =
-        runs_.figure([stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.depth; });
-    answer_.wetted_beyond_wall = runs_.figure(
-        [stop](const solver::TestRun& r) { return sample_at(r, stop).wetted.beyond_wall; });
-    const auto steady =
-        time_to_steady(setup_, first_resolution_, table_, [this] { return report(kSteadyShare); });
-    answer_.time_to_steady = steady.value_or(TimeToSteady{});
-    answer_.interrupted = answer_.interrupted || !steady;
+    answer_.record = true_record(question(), plan_, runs_.fine);
+    answer_.as_read = record_as_read(question(), plan_, runs_.fine);
+  } else if (!answer_.record.readings.empty()) {
+    finish();
+    look_deeper();
+  } else {  // the reservoir was empty before the first reading
+    answer_.flags = raise_flags({question(), plan_, runs_.fine, 0.0, answer_.stop_rule_met, 0.0});
   }
   answer_.run = std::move(runs_.fine);
   answer_.resolution = resolution_;

@@ -4,8 +4,9 @@
 /// would.
 ///
 /// Promised to the accuracy asked for: volumes from 5 % of the time of the stop, rates (and the
-/// Kfs made from them) from 25 %, the steady rate, the rate over the steady rate. The wetted
-/// depth and width carry their own, larger error.
+/// Kfs made from them) from 25 %, the steady rate, the rate over the steady rate; of a test in
+/// stages the rate at every stage's end and the Kfs of every pair (see head_pairs.hpp); of a double
+/// ring both rings. The wetted depth and width carry their own, larger error.
 
 #include <functional>
 #include <memory>

@@ -50,26 +50,53 @@ Figure CompanionRuns::steady_flow() const {
                  floor * steady_fine.ring_flow);
 }
 
+Figure CompanionRuns::steady_flow(const SteadyState& state) const {
+  return combine(state.fine.ring_flow, state.coarse.ring_flow, state.coarse.ring_flow,
+                 floor * state.fine.ring_flow);
+}
+
+Figure CompanionRuns::steady_outer_flow(const SteadyState& state) const {
+  return combine(state.fine.outer_flow, state.coarse.outer_flow, state.coarse.outer_flow,
+                 floor * state.fine.outer_flow);
+}
+
 Figure CompanionRuns::above_steady(double from, double to) const {
+  return above_steady(from, to, {{}, steady_fine, steady_coarse});
+}
+
+Figure CompanionRuns::above_steady(double from, double to, const SteadyState& state) const {
   const auto excess = [&](const solver::TestRun& r, double steady) {
     return (volume_at(r, to) - volume_at(r, from)) / (to - from) / steady - 1.0;
   };
-  const double value = excess(fine, steady_fine.ring_flow);
-  return combine(value, excess(coarse, steady_coarse.ring_flow),
-                 excess(loose, steady_coarse.ring_flow), floor * (value + 1.0));
+  const double value = excess(fine, state.fine.ring_flow);
+  return combine(value, excess(coarse, state.coarse.ring_flow),
+                 excess(loose, state.coarse.ring_flow), floor * (value + 1.0));
 }
 
-CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                             std::shared_ptr<const solver::CurveTable> table, int threads,
-                             const solver::StepObserver& observer,
+const SteadyState* CompanionRuns::steady_state(
+    const std::optional<solver::SteadyHeads>& heads) const {
+  if (!heads) return nullptr;
+  for (const SteadyState& s : steady_states)
+    if (s.heads.ring == heads->ring && s.heads.outer == heads->outer) return &s;
+  return nullptr;
+}
+
+double CompanionRuns::last_common_time() const {
+  double last = INFINITY;
+  for (const solver::TestRun* run : {&fine, &coarse, &loose})
+    last = std::min(last, run->samples.empty() ? 0.0 : run->samples.back().time);
+  return last;
+}
+
+CompanionRuns run_companions(const CompanionWork& work, const solver::Resolution& resolution,
+                             int threads, const solver::StepObserver& observer,
                              const std::function<bool()>& keep_going) {
   const auto policy = threads > 1 ? std::launch::async : std::launch::deferred;
   const solver::Resolution coarser = resolution.coarser();
   solver::Resolution looser = coarser;
   looser.theta_tolerance *= kLooser;
-  solver::TestSetup plain = setup;
+  solver::TestSetup plain = work.setup;
   plain.snapshots.clear();
-  const solver::SteadyRing steady{setup.soil, setup.ring, setup.pond_head};
 
   CompanionRuns runs;
   std::atomic<bool> stop{false};
@@ -79,15 +106,22 @@ CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resol
   };
   const auto unless_stopped = [&going](double) { return going(); };
   auto others = std::async(policy, [&] {
-    runs.coarse = solver::run_test(plain, coarser, table, unless_stopped);
+    runs.coarse = solver::run_test(plain, coarser, work.materials, unless_stopped);
     if (!going()) return;
-    runs.loose = solver::run_test(plain, looser, table, unless_stopped);
+    runs.loose = solver::run_test(plain, looser, work.materials, unless_stopped);
     if (!going()) return;
-    runs.steady_fine = solver::steady_flow(steady, resolution, table);
-    runs.steady_coarse = solver::steady_flow(steady, coarser, table);
+    for (const solver::SteadyHeads& heads : work.held) {
+      const auto steady = [&](const solver::Resolution& r) {
+        return solver::steady_flow(work.setup, heads, r, work.materials);
+      };
+      runs.steady_states.push_back({heads, steady(resolution), steady(coarser)});
+    }
+    if (runs.steady_states.empty()) return;
+    runs.steady_fine = runs.steady_states.back().fine;
+    runs.steady_coarse = runs.steady_states.back().coarse;
   });
   try {
-    runs.fine = solver::run_test(setup, resolution, table, observer);
+    runs.fine = solver::run_test(work.setup, resolution, work.materials, observer);
   } catch (...) {
     stop = true;  // the others refer to this frame: end them before leaving it
     if (policy == std::launch::async) others.wait();

@@ -10,20 +10,28 @@
 /// graded meshes. It overestimates, and is meant to. The steady flow has its own pair.
 
 #include <functional>
-#include <memory>
+#include <optional>
+#include <vector>
 
 #include "postprocess/reading/answer.hpp"
-#include "solver/flow/curve_table.hpp"
+#include "solver/ground_materials.hpp"
 #include "solver/steady_ring.hpp"
 #include "solver/virtual_test.hpp"
 
 namespace ringwright::postprocess {
 
+/// Heads held for good, with the flow they come to on both meshes.
+struct SteadyState {
+  solver::SteadyHeads heads;
+  solver::SteadyFlow fine, coarse;
+};
+
 struct CompanionRuns {
   solver::TestRun fine, coarse, loose;
-  solver::SteadyFlow steady_fine, steady_coarse;
-  bool interrupted = false;  ///< only `fine` is filled in, as far as it came
-  double floor = 0.0;        ///< least relative error of any figure [-]
+  std::vector<SteadyState> steady_states;         ///< one for each of the heads asked for
+  solver::SteadyFlow steady_fine, steady_coarse;  ///< of the last of them
+  bool interrupted = false;                       ///< only `fine` is filled in, as far as it came
+  double floor = 0.0;                             ///< least relative error of any figure [-]
 
   /// A figure made from any of the runs by the same function. @param f takes a TestRun
   Figure figure(const std::function<double(const solver::TestRun&)>& f) const;
@@ -31,9 +39,17 @@ struct CompanionRuns {
   Figure soil_volume(double t) const;
   /// Mean flow between two sampled times [m3/s].
   Figure mean_flow(double from, double to) const;
-  Figure steady_flow() const;  ///< [m3/s]
+  Figure steady_flow() const;  ///< of the last of the heads asked for [m3/s]
+  Figure steady_flow(const SteadyState& state) const;        ///< into the (inner) ring [m3/s]
+  Figure steady_outer_flow(const SteadyState& state) const;  ///< into the annulus [m3/s]
   /// Mean flow between two sampled times over the steady flow, minus 1 [-].
   Figure above_steady(double from, double to) const;
+  Figure above_steady(double from, double to, const SteadyState& state) const;
+  /// The state of these heads. @return null where there is none
+  const SteadyState* steady_state(const std::optional<solver::SteadyHeads>& heads) const;
+  /// Last time that was sampled in all three: runs that a reservoir ends, end at times of their
+  /// own.
+  double last_common_time() const;
 };
 
 /// The sample at a time that was sampled.
@@ -44,12 +60,18 @@ const solver::Sample& sample_at(const solver::TestRun& run, double t);
 /// @throws std::out_of_range for a time that was not
 double volume_at(const solver::TestRun& run, double t);
 
+/// What companions share.
+struct CompanionWork {
+  const solver::TestSetup& setup;
+  const std::vector<solver::Material>& materials;
+  std::vector<solver::SteadyHeads> held;  ///< heads whose steady flow is asked for; may be empty
+};
+
 /// Runs all of them; with more than one thread side by side, with the same result.
 /// @param observer sees the fine run and may stop all @param keep_going asked by the others,
 /// perhaps from another thread
-CompanionRuns run_companions(const solver::TestSetup& setup, const solver::Resolution& resolution,
-                             std::shared_ptr<const solver::CurveTable> table, int threads,
-                             const solver::StepObserver& observer,
+CompanionRuns run_companions(const CompanionWork& work, const solver::Resolution& resolution,
+                             int threads, const solver::StepObserver& observer,
                              const std::function<bool()>& keep_going = {});
 
 /// The floor of the error for an accuracy asked for: two meshes may agree by chance, and the

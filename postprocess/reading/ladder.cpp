@@ -7,6 +7,7 @@
 #include "models/estimators/reynolds_elrick_single_head.hpp"
 #include "models/soil/capillary_length.hpp"
 #include "postprocess/reading/test_times.hpp"
+#include "postprocess/reading/true_kfs.hpp"
 
 namespace ringwright::postprocess {
 namespace {
@@ -19,14 +20,19 @@ Figure times(const Figure& f, double factor) {
   return {f.value * factor, f.error * std::abs(factor)};
 }
 
+double head_of(const Question& q) {
+  const auto& stages = q.setup.program.stages;
+  return stages.empty() ? q.setup.pond_head : stages.front().head;
+}
+
 // Both formulas are linear in the rate: the factors are per unit of rate.
 struct PerRate {
   double rate_as_kfs, one_head, one_head_own_lambda;
 };
 
 PerRate reads_per_rate(const Question& q, double own_lambda) {
-  const double a = q.setup.ring.radius, d = q.setup.ring.insertion, H = q.setup.pond_head;
-  const double Ks = q.setup.soil.Ks;
+  const double a = q.setup.ring.radius, d = q.setup.ring.insertion, H = head_of(q);
+  const double Ks = true_kfs(q);
   const auto kfs = [&](double alpha_star) {
     const models::SteadyRing unit_rate{.rate = 1.0, .head = H, .radius = a, .insertion = d};
     return models::reynolds_elrick_single_head(unit_rate, alpha_star);
@@ -39,40 +45,18 @@ ReadsX reads(const Figure& rate, const PerRate& per) {
           times(rate, per.one_head_own_lambda)};
 }
 
-// Splits a figure's error again into mesh and time, for the choice of what to refine.
-class WorstOf {
- public:
-  explicit WorstOf(const CompanionRuns& runs) : runs_(runs) {}
-
-  template <class F>
-  void promise(const Figure& figure, const F& f) {
-    const double scale = std::abs(f(runs_.fine));
-    worst_.relative_error = std::max(worst_.relative_error, figure.error / scale);
-    worst_.mesh_part =
-        std::max(worst_.mesh_part, std::abs(f(runs_.fine) - f(runs_.coarse)) / scale);
-    worst_.time_part =
-        std::max(worst_.time_part, std::abs(f(runs_.coarse) - f(runs_.loose)) / scale);
-  }
-  void promise(const Figure& figure, double mesh_part) {
-    worst_.relative_error = std::max(worst_.relative_error, figure.relative_error());
-    worst_.mesh_part = std::max(worst_.mesh_part, mesh_part);
-  }
-  const WorstFigure& worst() const { return worst_; }
-
- private:
-  const CompanionRuns& runs_;
-  WorstFigure worst_;
-};
-
 }  // namespace
 
 Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
   const double area = std::numbers::pi * q.setup.ring.radius * q.setup.ring.radius;
-  const PerRate per = reads_per_rate(q, models::capillary_length(*q.setup.soil.curves));
-  const double filling = area * q.setup.pond_head;
+  const PerRate per = reads_per_rate(q, models::capillary_length(*foot_soil(q.setup).curves));
+  const bool has_program = !q.setup.program.stages.empty();
+  const double filling = has_program ? 0.0 : area * q.setup.pond_head;
   WorstOf worst(runs);
   Ladder ladder;
-  for (double t : ladder_times(q.reading_interval, stop, q.setup.duration, kRows)) {
+  const bool whole = runs.last_common_time() >= q.setup.duration * (1 - 1e-9);
+  const double longest = whole ? q.setup.duration : stop;
+  for (double t : ladder_times(q.reading_interval, stop, longest, kRows)) {
     const double from = std::max(0.0, t - q.reading_interval);
     const auto flow = [&](const solver::TestRun& r) {
       return (volume_at(r, t) - (from > 1e-9 * t ? volume_at(r, from) : 0.0)) / (t - from);
@@ -83,6 +67,9 @@ Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
     row.rate = times(runs.figure(flow), 1.0 / area);
     row.soil_volume = runs.figure(volume);
     row.supply_volume = {row.soil_volume.value + filling, row.soil_volume.error};
+    if (has_program)
+      row.supply_volume =
+          runs.figure([t](const solver::TestRun& r) { return sample_at(r, t).water.supply; });
     row.reads = reads(row.rate, per);
     row.above_steady = runs.above_steady(from > 1e-9 * t ? from : 0.0, t);
     row.stops_here = std::abs(t - stop) <= 1e-9 * stop;

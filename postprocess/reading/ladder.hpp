@@ -5,15 +5,9 @@
 
 #include "postprocess/reading/answer.hpp"
 #include "postprocess/reading/companion_runs.hpp"
+#include "postprocess/reading/worst_figure.hpp"
 
 namespace ringwright::postprocess {
-
-/// The least accurate of the promised figures.
-struct WorstFigure {
-  double relative_error = 0.0;  ///< [-]
-  double mesh_part = 0.0;       ///< of the promised figures, the largest from the mesh [-]
-  double time_part = 0.0;       ///< the largest from the time tolerance [-]
-};
 
 struct Ladder {
   std::vector<LadderRow> rows;
@@ -22,6 +16,7 @@ struct Ladder {
   WorstFigure worst;
 };
 
+/// @param question with one constant head from start to end; `runs` hold its steady flow
 /// @param stop time at which the test ends [s], one of the sampled times
 Ladder make_ladder(const Question& question, const CompanionRuns& runs, double stop);
 

@@ -20,6 +20,22 @@ std::vector<double> times_up_to(double end) {
   return times;
 }
 
+double outer_head(const solver::TestSetup& setup) {
+  const auto& stages = setup.outer_program.stages;
+  return stages.empty() ? setup.pond_head : stages.front().head;
+}
+
+// The same heads without limits of the supply, evaporation and incidents.
+solver::TestSetup held_for_good(const solver::TestSetup& setup) {
+  solver::TestSetup on = setup;
+  on.snapshots.clear();
+  if (!setup.program.stages.empty()) on.pond_head = setup.program.stages.front().head;
+  on.program = on.outer_program = {};
+  if (setup.outer_ring && outer_head(setup) != on.pond_head)
+    on.outer_program.stages = {{.head = outer_head(setup), .duration = kLongest}};
+  return on;
+}
+
 // Last time the mean flow between samples is more than kWithin from steady, between the middles of
 // the intervals; the end of the last sample when it still is there; 0 when it never is.
 double last_crossing(const std::vector<solver::Sample>& samples, double steady_flow) {
@@ -42,21 +58,22 @@ double last_crossing(const std::vector<solver::Sample>& samples, double steady_f
 
 std::optional<TimeToSteady> time_to_steady(const solver::TestSetup& setup,
                                            const solver::Resolution& resolution,
-                                           std::shared_ptr<const solver::CurveTable> table,
+                                           const std::vector<solver::Material>& materials,
                                            const std::function<bool()>& keep_going) {
-  const double steady_flow =
-      solver::steady_flow({setup.soil, setup.ring, setup.pond_head}, resolution, table).ring_flow;
+  solver::TestSetup on = held_for_good(setup);
+  solver::SteadyHeads heads{on.pond_head};
+  if (on.outer_ring) heads.outer = outer_head(on);
+  const double steady_flow = solver::steady_flow(on, heads, resolution, materials).ring_flow;
   // Wu et al. 1999 (SSSAJ 63:788): the approach scales with dtheta lambda / Ks.
   const double dtheta = setup.soil.theta_s - setup.soil.water_content(setup.initial_head);
-  const double scale = dtheta * (table->capillary_length() + setup.pond_head) / setup.soil.Ks;
-  solver::TestSetup on = setup;
-  on.snapshots.clear();
+  const double lambda = materials.front().table->capillary_length();
+  const double scale = dtheta * (lambda + on.pond_head) / setup.soil.Ks;
   for (double end = std::max(setup.duration, 5.0 * scale);; end *= 4.0) {
     end = std::min(end, std::max(kLongest, setup.duration));
     on.duration = end;
     on.times = times_up_to(end);
     const solver::TestRun run = solver::run_test(
-        on, resolution, table, [&](double) { return !keep_going || keep_going(); });
+        on, resolution, materials, [&](double) { return !keep_going || keep_going(); });
     if (run.interrupted) return std::nullopt;
     const double last = last_crossing(run.samples, steady_flow);
     if (last < end / 2 || end >= kLongest) return TimeToSteady{last, last > 0.99 * end};

@@ -3,6 +3,7 @@
 #include <catch2/catch.hpp>
 #include <cstring>
 
+#include "solver/flow/curve_table.hpp"
 #include "solver/resolution.hpp"
 #include "tests/postprocess/reading/ring_question.hpp"
 
@@ -104,9 +105,10 @@ TEST_CASE("companions differ from the fine run as they should", "[reading]") {
   setup.times = {600.0, setup.duration};
   setup.snapshots = {600.0};
   const auto table = std::make_shared<solver::CurveTable>(setup.soil.curves);
+  const auto materials = solver::ground_materials(setup, table);
   const solver::Resolution r =
       solver::resolution_for(setup, 0.01, table->capillary_length(), 600.0);
-  const CompanionRuns runs = run_companions(setup, r, table, 1, {});
+  const CompanionRuns runs = run_companions({setup, materials, {{setup.pond_head}}}, r, 1, {});
   CHECK(runs.coarse.statistics.cells < 0.5 * runs.fine.statistics.cells);
   CHECK(runs.coarse.statistics.cells == runs.loose.statistics.cells);
   CHECK(runs.loose.statistics.steps < runs.coarse.statistics.steps);
@@ -123,10 +125,12 @@ TEST_CASE("a stopped fine run leaves what it had, whatever the threads", "[readi
   solver::TestSetup setup = q.setup;
   setup.times = {60.0, 600.0, setup.duration};
   const auto table = std::make_shared<solver::CurveTable>(setup.soil.curves);
+  const auto materials = solver::ground_materials(setup, table);
   const solver::Resolution r = solver::resolution_for(setup, 0.01, table->capillary_length(), 60.0);
   for (int threads : {1, 2}) {
     const CompanionRuns runs =
-        run_companions(setup, r, table, threads, [](double t) { return t < 700.0; });
+        run_companions({setup, materials, {{setup.pond_head}}}, r, threads,
+                       [](double t) { return t < 700.0; });
     CAPTURE(threads);
     CHECK(runs.fine.interrupted);
     CHECK(runs.fine.samples.size() == 2);
