@@ -34,6 +34,17 @@ void add_ground(const Ground& ground, std::size_t variant, double viscosity_rati
   setup.gap = ground.gap;
 }
 
+// Of the layer that is named; without one the answer looks where the foot of the wall is.
+std::optional<double> true_Kfs(const Ground& ground, std::size_t variant, double viscosity_ratio) {
+  if (ground.truth_layer.empty()) return std::nullopt;
+  if (ground.variants[variant].label == ground.truth_layer)
+    return ground.variants[variant].soil.Ks / viscosity_ratio;
+  for (const GroundLayer& layer : ground.layers_below) {
+    if (layer.name == ground.truth_layer) return layer.variants[variant].soil.Ks / viscosity_ratio;
+  }
+  return std::nullopt;
+}
+
 models::Gauge gauge_of(const Test& test) {
   models::Gauge gauge;
   gauge.volume_division = test.reader.volume_division;
@@ -98,6 +109,7 @@ postprocess::Question question_of(const Test& test, const Ground& ground,
   }
   question.gauge = gauge_of(test);
   question.rules = rules_of(test);
+  question.true_Kfs = true_Kfs(ground, index, question.viscosity_ratio);
   question.circumstances = circumstances_of(test, ground);
   question.assumed_alpha_star = test.assumed_alpha_star;
   question.accuracy = accuracy;

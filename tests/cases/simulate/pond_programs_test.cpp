@@ -108,6 +108,21 @@ TEST_CASE("gauge, rules and circumstances are asked as the case says", "[questio
   CHECK(question_of(case_of("head: 8 cm, stop: after 2 h")).rules.empty());
 }
 
+TEST_CASE("the true Kfs may be that of a named layer, at test temperature", "[question]") {
+  const auto kfs = [](const std::string& more) {
+    const Case what = read_case(
+        "ringwright: 1\nground:\n  water: 0 degC\n  parameters: { theta_r: 0.05, theta_s: 0.4, "
+        "alpha: 3 1/m, n: 1.6, Ks: 2 cm/h }\n  layers:\n    - { name: pan, from: 20 cm, "
+        "parameters: { theta_r: 0.05, theta_s: 0.4, alpha: 3 1/m, n: 1.6, Ks: 0.5 cm/h } }\n" +
+            more + "tests:\n  a: { ring: 20 cm, head: 5 cm, insert: 10 cm }\n",
+        "x.yaml");
+    return question_of(what).true_Kfs;
+  };
+  CHECK_FALSE(kfs(""));
+  // Viscosity at 0 over that at 20 degC: 1.789 (IAPWS release on liquid water, from memory).
+  CHECK(kfs("  true Kfs of: pan\n").value() == Approx(0.005 / 3600 / 1.789).epsilon(1e-3));
+}
+
 TEST_CASE("the resolved case holds programs, rings and layers in SI", "[question]") {
   const auto json = resolved_case(case_of(
       "outer ring: 40 cm, heads: 5 cm then 15 cm, soak: 5 cm for 30 min, stop: after 20 L"));
