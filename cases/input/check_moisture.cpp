@@ -8,16 +8,17 @@ namespace {
 // A content or degree of saturation must lie between theta_r and theta_s of every soil meant.
 void check_content(const SectionReader& section, const std::string& moisture_key,
                    const std::string& soil_key, const GroundLayer& layer, Reading& reading) {
+  const std::string key = moisture_key.empty() ? soil_key : moisture_key;
   for (const SoilVariant& variant : layer.variants) {
     const models::Soil& soil = variant.soil;
     const Moisture& moisture = layer.moisture;
     const double content =
         moisture.water_content.value_or(moisture.saturation.value_or(0.0) * soil.theta_s);
-    const std::string front = section.front_of(moisture_key);
+    const std::string front = section.front_of(key);
     const std::string given = fmt::format("water content {:.3g} %", 100 * content);
     if (content >= soil.theta_s) {
       reading.contradiction(
-          section.value_place(moisture_key),
+          section.value_place(key),
           fmt::format("{}{} is not below saturation, {:.3g} %", front, given, 100 * soil.theta_s),
           section.key_place(soil_key),
           fmt::format("theta_s of {}, {}", variant.label, variant.source),
@@ -26,7 +27,7 @@ void check_content(const SectionReader& section, const std::string& moisture_key
     }
     if (content <= soil.theta_r || initial_head(moisture, soil) < -1000.0) {
       reading.contradiction(
-          section.value_place(moisture_key),
+          section.value_place(key),
           fmt::format("{}{} is drier than this soil gets; its residual content is {:.3g} %", front,
                       given, 100 * soil.theta_r),
           section.key_place(soil_key),

@@ -87,7 +87,8 @@ Ground read_ground(const LocatedNode& node, const Place& where, const Key& gramm
   const bool own_soil = names_a_soil(section) || !section.has("layers");
   if (own_soil) {
     layers.push_back(read_layer(section, where, -ground.test_level, context, reading));
-    context.moisture = layers.front().moisture;
+    // A moisture that was refused would be refused again in every layer.
+    if (!layers.front().variants.empty()) context.moisture = layers.front().moisture;
   } else {
     context.moisture = common_moisture(section, context, reading);
   }

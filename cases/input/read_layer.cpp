@@ -85,6 +85,17 @@ void echo_moisture(const SectionReader& section, const std::string& moisture_key
                              100 * *moisture.suction, contents));
 }
 
+// The ground's own water content says nothing of a layer known by what fills in it.
+void refuse_inherited_content(const SectionReader& section, const std::string& soil_key_name,
+                              const GroundLayer& layer, Reading& reading) {
+  const bool capillary = soil_key_name == "capillary length" || soil_key_name == "alpha star";
+  if (!capillary || layer.moisture.suction) return;
+  reading.problem(section.key_place(soil_key_name),
+                  section.front_of(soil_key_name) +
+                      "this soil is known by its fillable porosity only, not by a content",
+                  "give this layer its moisture as dry, moist, wet or a suction");
+}
+
 }  // namespace
 
 GroundLayer read_layer(const SectionReader& section, const Place& where, double depth,
@@ -94,6 +105,7 @@ GroundLayer read_layer(const SectionReader& section, const Place& where, double 
   const std::string key = soil_key(section, where, reading);
   const auto texture = read_texture(section);
   const auto moisture_key = moisture_of(section, texture, depth, context, layer, reading);
+  if (moisture_key && moisture_key->empty()) refuse_inherited_content(section, key, layer, reading);
   layer.variants = read_soil(section, key, texture, layer.moisture.suction, reading);
   const auto anisotropy = section.quantity("Kr over Kz");
   const auto name = section.text("name");
