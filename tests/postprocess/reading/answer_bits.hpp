@@ -27,6 +27,26 @@ inline std::vector<std::uint64_t> bits_of(const Answer& a) {
                    a.initial_saturation, a.own_capillary_length, a.worst_relative_error,
                    a.balance_error, static_cast<double>(a.total_steps)})
     add(x);
+  for (const models::Reading& r : a.as_read.readings)
+    for (double x : {r.volume, r.total_volume, r.head}) add(x);
+  for (const StageReading& s : a.stages) {
+    add(s.from), add(s.to), add(s.head_from), add(s.head_to), add(s.rate_as_read);
+    add_figure(s.rate), add_figure(s.soil_volume), add_figure(s.steady_rate);
+  }
+  for (const HeadPair& p : a.pairs) add_figure(p.kfs), add_figure(p.reads), add(p.kfs_as_read);
+  for (const RuleVerdict& v : a.verdicts) {
+    add(v.stop.value_or(-1.0));
+    add_figure(v.rate), add_figure(v.above_steady), add_figure(v.supply_volume);
+  }
+  const auto add_water = [&](const WaterUse& w) {
+    add_figure(w.soil), add_figure(w.supply);
+    add(w.standing), add(w.evaporated), add(w.removed), add(w.peak_flow);
+  };
+  add_water(a.water);
+  if (a.outer_water) add_water(*a.outer_water);
+  if (a.outer) add_figure(a.outer->rate), add_figure(a.outer->steady_rate);
+  for (const Flag& f : a.flags) add(static_cast<double>(f.kind)), add(f.value), add(f.limit);
+  add(a.influence.depth), add(a.influence.known);
   for (const solver::Sample& s : a.run.samples)
     for (double x :
          {s.time, s.ring_volume, s.ring_flow, s.drainage_volume, s.seepage_volume, s.stored_volume})

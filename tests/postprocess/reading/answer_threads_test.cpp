@@ -5,6 +5,7 @@
 #include "solver/flow/curve_table.hpp"
 #include "tests/postprocess/reading/answer_bits.hpp"
 #include "tests/postprocess/reading/ring_question.hpp"
+#include "tests/postprocess/reading/staged_question.hpp"
 
 using namespace ringwright;
 using namespace ringwright::postprocess;
@@ -17,6 +18,15 @@ TEST_CASE("companion runs side by side give the bits of one after the other",
     const auto one = bits_of(answer(q));
     q.threads = 2;
     CAPTURE(texture);
+    CHECK(bits_of(answer(q)) == one);
+  }
+}
+
+TEST_CASE("stages and two rings give the same bits with one thread and with two",
+          "[reading][threads]") {
+  for (Question q : {two_head_question(), double_ring_question()}) {
+    const auto one = bits_of(answer(q));
+    q.threads = 2;
     CHECK(bits_of(answer(q)) == one);
   }
 }

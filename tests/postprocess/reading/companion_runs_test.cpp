@@ -128,9 +128,8 @@ TEST_CASE("a stopped fine run leaves what it had, whatever the threads", "[readi
   const auto materials = solver::ground_materials(setup, table);
   const solver::Resolution r = solver::resolution_for(setup, 0.01, table->capillary_length(), 60.0);
   for (int threads : {1, 2}) {
-    const CompanionRuns runs =
-        run_companions({setup, materials, {{setup.pond_head}}}, r, threads,
-                       [](double t) { return t < 700.0; });
+    const CompanionRuns runs = run_companions({setup, materials, {{setup.pond_head}}}, r, threads,
+                                              [](double t) { return t < 700.0; });
     CAPTURE(threads);
     CHECK(runs.fine.interrupted);
     CHECK(runs.fine.samples.size() == 2);

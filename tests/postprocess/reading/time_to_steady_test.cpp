@@ -23,7 +23,9 @@ struct Approach {
         table(std::make_shared<solver::CurveTable>(s.soil.curves)),
         resolution(solver::resolution_for(s, 0.01, table->capillary_length(), 0.05 * s.duration)) {}
 
-  TimeToSteady found() const { return time_to_steady(setup, resolution, solver::ground_materials(setup, table)).value(); }
+  TimeToSteady found() const {
+    return time_to_steady(setup, resolution, solver::ground_materials(setup, table)).value();
+  }
 
   // Flow over steady flow minus 1 at each of the times.
   std::vector<double> excess(const std::vector<double>& times) const {
