@@ -9,6 +9,7 @@
 #include "postprocess/reading/depth_of_influence.hpp"
 #include "postprocess/reading/flags/flags.hpp"
 #include "postprocess/reading/read_runs.hpp"
+#include "postprocess/reading/refinement.hpp"
 #include "postprocess/reading/rule_verdicts.hpp"
 #include "postprocess/reading/test_plan.hpp"
 #include "postprocess/reading/test_record.hpp"
@@ -24,20 +25,9 @@ namespace {
 
 constexpr double kVolumesFrom = 0.05;  // of the stop: when volumes are promised
 constexpr int kMostRefinements = 6;
-constexpr double kMeshShare = 0.6;  // of the accuracy, aimed at for the mesh when refining
 // The estimate is two to four times the error: begin finer than the accuracy needs, so that one
 // set of runs mostly does.
 constexpr double kBeginAt = 0.36;
-// How a test with one head and one ring is refined, and one with more. In the Kfs of a pair and the
-// inner flow of a double ring, which are differences, errors count several times: those of the
-// cells at the foot of the wall most, those of time steps next.
-struct Manner {
-  double begin_tolerance, begin_cells, begin_tip;  // shares of what the accuracy would ask for
-  double least_cells;                              // share of the cell size kept in one round
-  double time_share, tolerance;  // above this share of the accuracy the tolerance falls to this
-};
-constexpr Manner kSimple{0.5, 1.0, 1.0, 0.4, 0.3, 0.3};
-constexpr Manner kMore{0.3, 0.8, 0.6, 0.55, 0.5, 0.4};
 constexpr int kMostCells = 40000;
 constexpr double kPeakInterval = 60.0;  // [s]
 constexpr int kSnapshots = 12;
@@ -64,9 +54,6 @@ class Answering {
  private:
   double pilot_stop(const solver::Resolution& resolution);
   void run_until_accurate();
-  const Manner& manner() const;
-  void begin_finer(solver::Resolution& resolution) const;
-  void refine(solver::Resolution& resolution) const;
   void describe_soil();
   void finish();
   void look_deeper();
@@ -122,7 +109,8 @@ void Answering::run_until_accurate() {
   const double stop = pilot_stop(first_resolution_.coarser());
   add_times(setup_.snapshots, {stop});
   resolution_ = solver::resolution_for(setup_, kBeginAt * accuracy, lambda, kVolumesFrom * stop);
-  begin_finer(resolution_);
+  const Refinement refinement(plan_, question());
+  resolution_ = refinement.begin(resolution_);
   double from = kPilotShare;
   for (;; ++answer_.refinements) {
     // How many rounds there will be is not known: each takes half of what is left.
@@ -144,32 +132,8 @@ void Answering::run_until_accurate() {
     answer_.accuracy_met = worst_.relative_error <= accuracy;
     if (answer_.accuracy_met || answer_.refinements == kMostRefinements || s.cells > kMostCells)
       return;
-    refine(resolution_);
+    resolution_ = refinement.next(resolution_, worst_);
   }
-}
-
-const Manner& Answering::manner() const {
-  return plan_.stages.size() == 1 && !setup_.outer_ring ? kSimple : kMore;
-}
-
-void Answering::begin_finer(solver::Resolution& resolution) const {
-  const Manner& m = manner();
-  resolution.theta_tolerance *= m.begin_tolerance;
-  if (m.begin_cells == 1.0) return;
-  const double top = resolution.top_cell;
-  resolution = resolution.scaled(m.begin_cells);
-  resolution.tip_cell *= m.begin_tip;
-  resolution.top_cell = std::min(top, 2 * resolution.tip_cell);
-}
-
-// Errors of the mesh fall about with the square of the cell size, those of time with the tolerance.
-void Answering::refine(solver::Resolution& resolution) const {
-  const double accuracy = question().accuracy;
-  const Manner& m = manner();
-  if (worst_.time_part > m.time_share * accuracy) resolution.theta_tolerance *= m.tolerance;
-  if (worst_.mesh_part > kMeshShare * accuracy)
-    resolution = resolution.scaled(
-        std::clamp(std::sqrt(kMeshShare * accuracy / worst_.mesh_part), m.least_cells, 0.9));
 }
 
 void Answering::describe_soil() {

@@ -32,6 +32,26 @@ struct Found {
 
 }  // namespace
 
+TEST_CASE("the influence is that of ground made by hand", "[reading]") {
+  solver::TestSetup as_is = ring_question("sandy loam").setup;
+  as_is.times = {as_is.duration};
+  models::Layer middle{0.07, as_is.soil, -3.0, "same"}, deep{0.12, as_is.soil, -2.0, "half"};
+  deep.soil.Ks *= 0.5;
+  as_is.layers_below = {deep};
+  const auto table = std::make_shared<solver::CurveTable>(as_is.soil.curves);
+  const auto r = solver::resolution_for(as_is, 0.02, table->capillary_length(), 360.0);
+  const double change = influence_of(as_is, 0.07, r, table);
+  // twice below 7 cm: of the uppermost soil down to 12 cm, of the layer from there on
+  const auto flow = [&](double factor) {
+    solver::TestSetup made = as_is;
+    made.layers_below = {middle, deep};
+    for (models::Layer& layer : made.layers_below) layer.soil.Ks *= factor;
+    return solver::run_test(made, r, table).samples.back().ring_flow;
+  };
+  CHECK(change == Approx(flow(2.0) / flow(1.0) - 1.0).epsilon(1e-6));
+  CHECK(change > 0.01);
+}
+
 TEST_CASE("below the depth of influence doubling K moves the rate by less than 5 %, above by more",
           "[reading]") {
   for (const char* texture : {"sandy loam", "silt"}) {

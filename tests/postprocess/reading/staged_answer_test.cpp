@@ -57,6 +57,15 @@ TEST_CASE("answer of three stages: stages, pairs and water tell the same story",
   CHECK(a.water.peak_flow < kArea * 0.10 / 60.0 + 2 * a.stages[1].rate.value * kArea);
 }
 
+TEST_CASE("what is poured in before an unlimited supply runs is no peak of it", "[reading]") {
+  Question q = two_head_question();
+  q.setup.program.stages.resize(1);
+  q.setup.duration = 1200.0;
+  const Answer a = answer(q);
+  CHECK(a.water.peak_flow == Approx(volume_at(a.run, 60.0) / 60.0));
+  CHECK(a.filling_volume == Approx(kArea * 0.05));
+}
+
 TEST_CASE("what a crew misreads is in the record as read only", "[reading]") {
   Question q = two_head_question();
   const Answer exact = answer(q);
