@@ -3,16 +3,14 @@
 #include <cmath>
 #include <string>
 
+#include "postprocess/reading/true_kfs.hpp"
+#include "postprocess/results/json_figure.hpp"
+#include "postprocess/results/protocol_json.hpp"
+
 namespace ringwright::postprocess {
 namespace {
 
 using nlohmann::json;
-
-json quantity(double value, const char* unit) { return {{"value", value}, {"unit", unit}}; }
-
-json figure(const Figure& from, const char* unit) {
-  return {{"value", from.value}, {"error", from.error}, {"unit", unit}};
-}
 
 Figure scaled(const Figure& from, double factor) {
   return {from.value * factor, from.error * std::abs(factor)};
@@ -27,7 +25,7 @@ json readings(const ReadsX& reads, double factor, const char* unit) {
 
 /// Adds what a rate reads: over the true Kfs, and as Kfs.
 void add_readings(json& row, const ReadsX& reads, const Question& question) {
-  const double kfs = question.setup.soil.Ks;
+  const double kfs = true_kfs(question);
   row["reads_x"] = readings(reads, 1.0, "1");
   row["reported_kfs"] = readings(reads, kfs, "m/s");
   row["reported_kfs_20degC"] = readings(reads, kfs * question.viscosity_ratio, "m/s");
@@ -95,7 +93,7 @@ json steady_json(const Answer& answer) {
 }
 
 json truth_json(const Question& question) {
-  const double kfs = question.setup.soil.Ks;
+  const double kfs = true_kfs(question);
   return {{"kfs", quantity(kfs, "m/s")},
           {"kfs_20degC", quantity(kfs * question.viscosity_ratio, "m/s")}};
 }
@@ -111,21 +109,24 @@ json numerics_json(const Answer& answer) {
 }  // namespace
 
 nlohmann::json to_json(const Answer& answer) {
-  return {{"question", question_json(answer.question)},
-          {"truth", truth_json(answer.question)},
-          {"record", record_json(answer.record)},
-          {"ladder", ladder_json(answer)},
-          {"stop_rule_met", answer.stop_rule_met},
-          {"steady", steady_json(answer)},
-          {"peak_flow", quantity(answer.peak_flow, "m3/s")},
-          {"filling_volume", quantity(answer.filling_volume, "m3")},
-          {"wetted_depth", figure(answer.wetted_depth, "m")},
-          {"wetted_beyond_wall", figure(answer.wetted_beyond_wall, "m")},
-          {"initial_water_content", quantity(answer.initial_water_content, "1")},
-          {"initial_effective_saturation", quantity(answer.initial_saturation, "1")},
-          {"own_capillary_length", quantity(answer.own_capillary_length, "m")},
-          {"numerics", numerics_json(answer)},
-          {"interrupted", answer.interrupted}};
+  json all = {{"question", question_json(answer.question)},
+              {"truth", truth_json(answer.question)},
+              {"record", record_json(answer.record)},
+              {"ladder", ladder_json(answer)},
+              {"stop_rule_met", answer.stop_rule_met},
+              {"steady", steady_json(answer)},
+              {"peak_flow", quantity(answer.peak_flow, "m3/s")},
+              {"filling_volume", quantity(answer.filling_volume, "m3")},
+              {"wetted_depth", figure(answer.wetted_depth, "m")},
+              {"wetted_beyond_wall", figure(answer.wetted_beyond_wall, "m")},
+              {"initial_water_content", quantity(answer.initial_water_content, "1")},
+              {"initial_effective_saturation", quantity(answer.initial_saturation, "1")},
+              {"own_capillary_length", quantity(answer.own_capillary_length, "m")},
+              {"numerics", numerics_json(answer)},
+              {"interrupted", answer.interrupted}};
+  all["as_read"] = record_json(answer.as_read);
+  add_protocol(all, answer);
+  return all;
 }
 
 nlohmann::json answer_document(const Answer& answer, const Provenance& provenance) {

@@ -5,6 +5,7 @@
 #include <vector>
 
 #include "postprocess/results/h5_write.hpp"
+#include "solver/mesh/ring_soils.hpp"
 
 namespace ringwright::postprocess {
 namespace {
@@ -49,6 +50,16 @@ void write_cells(hid_t group, const Drawing& drawing, const H5Handle& cell) {
                 {&cell});
 }
 
+void write_soils(hid_t group, const Drawing& drawing, const solver::TestSetup& setup,
+                 const H5Handle& cell) {
+  std::vector<std::int32_t> soils;
+  for (const auto& centre : drawing.centres)
+    soils.push_back(solver::soil_at(setup, centre[0], -centre[1]));
+  attach_scales(write_array(group, "soil", soils, {drawing.cells.size()},
+                            {"1", "soil index, 0: the uppermost layer, then downwards"}),
+                {&cell});
+}
+
 std::vector<double> times_of(const std::vector<Snapshot>& snapshots) {
   std::vector<double> times;
   for (const auto& snapshot : snapshots) times.push_back(snapshot.time);
@@ -81,7 +92,7 @@ std::string snapshot_name(const std::string& field, std::size_t snapshot) {
   return fmt::format("/fields/snapshots/{}_{:04}", field, snapshot);
 }
 
-void write_field_group(hid_t file, const solver::TestRun& run) {
+void write_field_group(hid_t file, const solver::TestRun& run, const solver::TestSetup& setup) {
   const auto group = create_group(file, "fields");
   const hsize_t cells = run.drawing.cells.size();
   const auto time = write_array(group.id(), "time", times_of(run.snapshots), {run.snapshots.size()},
@@ -90,6 +101,7 @@ void write_field_group(hid_t file, const solver::TestRun& run) {
   const auto cell = write_index(group.id(), "cell", cells, "cell of the mesh");
   write_points(group.id(), run.drawing);
   write_cells(group.id(), run.drawing, cell);
+  write_soils(group.id(), run.drawing, setup, cell);
   const auto snapshots = create_group(group.id(), "snapshots");
   write_field(group.id(), snapshots.id(), run.snapshots, "head", &Snapshot::head,
               {"m", "pressure head"}, time, cell, cells);

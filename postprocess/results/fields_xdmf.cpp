@@ -41,6 +41,16 @@ std::string attribute(const std::string& field, std::string_view unit, std::size
       data_item("Float", std::to_string(cells), 8, fields + ":" + snapshot_name(field, snapshot)));
 }
 
+// The same in every grid; whole numbers.
+std::string soil_attribute(std::size_t cells, const std::string& fields) {
+  return fmt::format(
+      "        <Attribute Name=\"soil\" AttributeType=\"Scalar\" Center=\"Cell\">\n"
+      "          <Information Name=\"units\" Value=\"1\"/>\n"
+      "          {}\n"
+      "        </Attribute>\n",
+      data_item("Int", std::to_string(cells), 4, fields + ":/fields/soil"));
+}
+
 std::string mesh(const solver::Drawing& drawing, const std::string& fields) {
   const auto cells = drawing.cells.size();
   return fmt::format(
@@ -60,11 +70,11 @@ std::string grid(const solver::TestRun& run, std::size_t snapshot, const std::st
   return fmt::format(
       "      <Grid Name=\"ground\" GridType=\"Uniform\">\n"
       "        <Time Value=\"{}\"/>\n"
-      "{}{}{}"
+      "{}{}{}{}"
       "      </Grid>\n",
       run.snapshots[snapshot].time, mesh(run.drawing, fields),
       attribute("head", "m", snapshot, cells, fields),
-      attribute("water_content", "1", snapshot, cells, fields));
+      attribute("water_content", "1", snapshot, cells, fields), soil_attribute(cells, fields));
 }
 
 }  // namespace

@@ -136,6 +136,15 @@ void write_text(hid_t parent, const std::string& name, const std::string& text,
   put_dataset(parent, name, {type.id(), type.id(), &start}, {}, {"", long_name});
 }
 
+H5Handle write_texts(hid_t parent, const std::string& name, const std::vector<std::string>& texts,
+                     const std::string& long_name) {
+  const auto type = text_type();
+  std::vector<const char*> starts;
+  for (const std::string& text : texts) starts.push_back(text.c_str());
+  return put_dataset(parent, name, {type.id(), type.id(), starts.data()}, {texts.size()},
+                     {"", long_name});
+}
+
 H5Handle write_stack(hid_t parent, const std::string& name, const std::vector<std::string>& rows,
                      hsize_t length, const Label& label) {
   const auto space = space_of({rows.size(), length});

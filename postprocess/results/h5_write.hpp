@@ -39,6 +39,10 @@ void write_scalar(hid_t parent, const std::string& name, std::int64_t value, con
 void write_text(hid_t parent, const std::string& name, const std::string& text,
                 const std::string& long_name);
 
+/// A list of texts of that kind.
+H5Handle write_texts(hid_t parent, const std::string& name, const std::vector<std::string>& texts,
+                     const std::string& long_name);
+
 /// One dataset (row, value) that shows other datasets of the same file as its rows.
 /// @param rows absolute names of datasets of extent (length), existing or not
 H5Handle write_stack(hid_t parent, const std::string& name, const std::vector<std::string>& rows,

@@ -2,61 +2,17 @@
 
 #include <string>
 
+#include "postprocess/reading/true_kfs.hpp"
+#include "postprocess/results/h5_table.hpp"
 #include "postprocess/results/h5_write.hpp"
+#include "postprocess/results/supplied.hpp"
 
 namespace ringwright::postprocess {
 namespace {
 
 using models::Reading;
+using solver::RingWater;
 using solver::Sample;
-
-/// A group of columns that share one dimension, time.
-template <typename Row>
-class TimeTable {
- public:
-  TimeTable(hid_t file, const std::string& name, const std::vector<Row>& rows)
-      : group_(create_group(file, name)),
-        rows_(rows),
-        time_(write_array(group_.id(), "time", values([](const Row& row) { return row.time; }),
-                          {rows.size()}, {"s", "time since ponding"})) {
-    make_scale(time_, "time");
-  }
-
-  /// @param of the value of a row
-  template <typename Of>
-  void column(const std::string& name, const Label& label, Of of) const {
-    attach_scales(write_array(group_.id(), name, values(of), {rows_.size()}, label), {&time_});
-  }
-
-  /// @param of the Figure of a row; the error goes into a column of its own
-  template <typename Of>
-  void figure(const std::string& name, const Label& label, Of of) const {
-    column(name, label, [&](const Row& row) { return of(row).value; });
-    column(name + "_error", {label.units, "numerical error of: " + label.long_name},
-           [&](const Row& row) { return of(row).error; });
-  }
-
-  /// @param of true or false for a row
-  template <typename Of>
-  void marks(const std::string& name, const std::string& long_name, Of of) const {
-    std::vector<std::int32_t> marks;
-    for (const auto& row : rows_) marks.push_back(of(row) ? 1 : 0);
-    attach_scales(write_array(group_.id(), name, marks, {marks.size()}, {"1", long_name}),
-                  {&time_});
-  }
-
- private:
-  template <typename Of>
-  std::vector<double> values(Of of) const {
-    std::vector<double> found;
-    for (const auto& row : rows_) found.push_back(of(row));
-    return found;
-  }
-
-  H5Handle group_;
-  const std::vector<Row>& rows_;
-  H5Handle time_;
-};
 
 void put_figure(hid_t group, const std::string& name, const Figure& figure, const Label& label) {
   write_scalar(group, name, figure.value, label);
@@ -86,7 +42,7 @@ void put_steady(hid_t group, const Answer& answer) {
 }
 
 void put_soil(hid_t group, const Answer& answer) {
-  write_scalar(group, "true_kfs", answer.question.setup.soil.Ks,
+  write_scalar(group, "true_kfs", true_kfs(answer.question),
                {"m/s", "true Kfs at test temperature"});
   write_scalar(group, "viscosity_ratio", answer.question.viscosity_ratio,
                {"1", "viscosity at test temperature over that at 20 degC"});
@@ -106,11 +62,24 @@ void put_extent(hid_t group, const Answer& answer) {
   put_figure(group, "wetted_depth", answer.wetted_depth, {"m", "wetted depth at the stop"});
   put_figure(group, "wetted_beyond_wall", answer.wetted_beyond_wall,
              {"m", "wetted distance outside the wall at the stop"});
+  write_scalar(group, "depth_of_influence", answer.influence.depth,
+               {"m", "depth below which doubling K moves the rate at the stop by less than 5 %"});
+  put_flag(group, "depth_of_influence_known", answer.influence.known,
+           "0: not looked for or deeper than the ground computed");
+  put_flag(group, "surfaced", answer.run.surfacing.happened, "1: water welled up outside");
+  write_scalar(group, "surfacing_time", answer.run.surfacing.first_time,
+               {"s", "when water first welled up outside"});
+  write_scalar(group, "surfacing_radius", answer.run.surfacing.farthest,
+               {"m", "largest radius at which water welled up"});
+  write_scalar(group, "surfacing_volume", answer.run.surfacing.volume,
+               {"m3", "volume that welled up in the whole run"});
 }
 
 void put_quality(hid_t group, const Answer& answer) {
   put_flag(group, "stop_rule_met", answer.stop_rule_met,
            "1: ended by the stop rule; 0: at the longest time");
+  put_flag(group, "ended_early", answer.ended_early,
+           "1: the reservoir was empty and the test ended there");
   put_flag(group, "interrupted", answer.interrupted, "1: stopped by the user, results end early");
   put_flag(group, "accuracy_met", answer.accuracy_met,
            "1: every promised figure as exact as asked");
@@ -123,10 +92,26 @@ void put_quality(hid_t group, const Answer& answer) {
                {"1", "refinements until the accuracy was met"});
 }
 
+// The water of one ring, in columns that begin with `front`.
+void put_ring_water(const Table<Sample>& table, const std::string& front, const std::string& whose,
+                    RingWater Sample::*water) {
+  const auto column = [&](const char* name, const char* unit, const char* what,
+                          double RingWater::*value) {
+    table.column(front + "_" + name, {unit, what + (" " + whose)},
+                 [&](const Sample& row) { return row.*water.*value; });
+  };
+  column("head", "m", "head at the soil surface, below 0 where no water stands,", &RingWater::head);
+  column("soil_volume", "m3", "volume into the soil", &RingWater::soil);
+  column("standing_volume", "m3", "volume standing in ring and vessel", &RingWater::standing);
+  column("supply_volume", "m3", "volume given by the supply", &RingWater::supply);
+  column("evaporated_volume", "m3", "volume evaporated", &RingWater::evaporated);
+  column("removed_volume", "m3", "volume bailed, bled or spilt", &RingWater::removed);
+}
+
 }  // namespace
 
 void write_totals_group(hid_t file, const std::vector<Sample>& samples) {
-  const TimeTable<Sample> table(file, "totals", samples);
+  const Table<Sample> table(file, "totals", samples);
   table.column("ring_volume", {"m3", "volume into the soil through the ring"},
                [](const Sample& row) { return row.ring_volume; });
   table.column("ring_flow", {"m3/s", "flow into the soil through the ring"},
@@ -137,11 +122,15 @@ void write_totals_group(hid_t file, const std::vector<Sample>& samples) {
                [](const Sample& row) { return row.seepage_volume; });
   table.column("stored_volume", {"m3", "change of the water stored in the soil"},
                [](const Sample& row) { return row.stored_volume; });
+  table.column("side_volume", {"m3", "volume out of the side"},
+               [](const Sample& row) { return row.side_volume; });
+  put_ring_water(table, "ring", "of the (inner) ring", &Sample::water);
+  put_ring_water(table, "outer_ring", "of the outer ring", &Sample::outer_water);
 }
 
 void write_record_group(hid_t file, const Answer& answer) {
   const auto& record = answer.record;
-  const TimeTable<Reading> table(file, "record", record.readings);
+  const Table<Reading> table(file, "record", record.readings);
   table.column("interval", {"s", "length of the reading interval"},
                [](const Reading& row) { return row.interval; });
   table.column("volume", {"m3", "volume into the soil in the interval"},
@@ -149,14 +138,14 @@ void write_record_group(hid_t file, const Answer& answer) {
   table.column("total_volume", {"m3", "volume into the soil since the start"},
                [](const Reading& row) { return row.total_volume; });
   table.column("supply_volume", {"m3", "volume drawn from the supply since the start"},
-               [&](const Reading& row) { return row.total_volume + answer.filling_volume; });
+               [&](const Reading& row) { return supplied_until(answer, row); });
   table.column("rate", {"m/s", "mean infiltration rate over the interval"},
                [&](const Reading& row) { return row.volume / (record.ring_area * row.interval); });
   table.column("head", {"m", "depth of the pond"}, [](const Reading& row) { return row.head; });
 }
 
 void write_ladder_group(hid_t file, const std::vector<LadderRow>& ladder) {
-  const TimeTable<LadderRow> table(file, "ladder", ladder);
+  const Table<LadderRow> table(file, "ladder", ladder);
   table.figure("rate", {"m/s", "mean infiltration rate over the last interval"},
                [](const LadderRow& row) { return row.rate; });
   table.figure("soil_volume", {"m3", "volume into the soil"},

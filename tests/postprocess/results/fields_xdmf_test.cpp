@@ -57,9 +57,10 @@ TEST_CASE("the time series has one grid of quads per snapshot") {
     CHECK(found[i].get<int>("Topology.<xmlattr>.NumberOfElements") == 6);
     CHECK(found[i].get<std::string>("Geometry.<xmlattr>.GeometryType") == "XY");
     const auto attributes = children(found[i], "Attribute");
-    REQUIRE(attributes.size() == 2);
+    REQUIRE(attributes.size() == 3);
     CHECK(attributes[0].get<std::string>("<xmlattr>.Name") == "head");
     CHECK(attributes[1].get<std::string>("<xmlattr>.Name") == "water_content");
+    CHECK(attributes[2].get<std::string>("<xmlattr>.Name") == "soil");
     for (const auto& attribute : attributes) {
       CHECK(attribute.get<std::string>("<xmlattr>.Center") == "Cell");
     }
@@ -73,7 +74,7 @@ TEST_CASE("every item points at a dataset of just that extent in the file beside
   const H5Reader reader(folder.path() / "fields.h5");
   std::vector<Tree> items;
   collect_data_items(parsed(fields_xdmf(answer.run, "fields.h5")), items);
-  REQUIRE(items.size() == 12);
+  REQUIRE(items.size() == 15);
   for (const auto& item : items) {
     const auto place = item.data();
     INFO(place);

@@ -50,6 +50,20 @@ class H5Reader {
     return taken(found);
   }
 
+  /// A list of texts.
+  std::vector<std::string> texts(const std::string& name) const {
+    const auto dataset = object(name);
+    const auto type = utf8();
+    const auto space = space_of(dataset);
+    std::vector<char*> found(static_cast<std::size_t>(H5Sget_simple_extent_npoints(space.id())));
+    if (H5Dread(dataset.id(), type.id(), H5S_ALL, H5S_ALL, H5P_DEFAULT, found.data()) < 0) {
+      throw std::runtime_error("cannot read " + name);
+    }
+    std::vector<std::string> copies;
+    for (char* text : found) copies.push_back(taken(text));
+    return copies;
+  }
+
   /// A text attribute of an object; checks that it is of variable length and UTF-8.
   std::string attribute(const std::string& object_name, const std::string& name) const {
     const postprocess::H5Handle found = open_attribute(object_name, name);

@@ -132,6 +132,35 @@ inline postprocess::Answer synthetic_answer() {
   return answer;
 }
 
+/// The same, as if it had stages, an outer ring, rules, flags and events.
+inline postprocess::Answer eventful_answer() {
+  postprocess::Answer answer = synthetic_answer();
+  answer.as_read = answer.record;
+  for (auto& reading : answer.as_read.readings) reading.volume *= 1.1;
+  answer.stages = {
+      {0, 0.0, 600.0, 0.05, 0.05, figure(9e-6), 8.9e-6, figure(1e-3), figure(8e-6)},
+      {1, 600.0, 1200.0, 0.15, 0.15, figure(2e-5), 2.2e-5, figure(2e-3), figure(1.7e-5), true}};
+  answer.pairs = {{0, 1, figure(5e-6), figure(1.0 / 3.0), 4e-6, true, false}};
+  answer.verdicts.resize(2);
+  answer.verdicts[0].stop = 1200.0;
+  answer.verdicts[0].rate = figure(9e-6);
+  answer.verdicts[0].above_steady = figure(0.125);
+  answer.verdicts[0].supply_volume = figure(0.0098);
+  answer.verdicts[1].rule.kind = models::StopKind::after_volume;
+  answer.verdicts[1].rule.name = "six hours";
+  answer.flags = {{postprocess::FlagKind::surfacing, 0.002, 2700.0, 0.25, false},
+                  {postprocess::FlagKind::piping, 2.5, 0.9, 0.0, true}};
+  answer.run.events = {{300.0, solver::EventKind::reservoir_empty, true, 0.02},
+                       {400.0, solver::EventKind::refilled, false, 0.1}};
+  answer.run.surfacing = {true, 2700.0, 0.25, 0.003};
+  answer.water = {figure(0.003), figure(0.0098), 0.0065, 0.0002, 0.0001, 1e-5};
+  answer.outer_water = {figure(0.03), figure(0.098), 0.065, 0.002, 0.001, 1e-4};
+  answer.outer = postprocess::OuterReading{figure(1e-5), figure(0.9e-5)};
+  answer.influence = {0.21, true};
+  answer.ended_early = true;
+  return answer;
+}
+
 inline postprocess::Origin synthetic_origin() {
   return {"0.1.0",
           "ringwright: 1\njob: Quernmoor Hollow, 5 °C  # invented\n",
