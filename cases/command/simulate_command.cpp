@@ -8,10 +8,10 @@
 #include "cases/command/simulate_options.hpp"
 #include "cases/command/subcommand.hpp"
 #include "cases/simulate/first_screen.hpp"
-#include "cases/simulate/ladder_csv.hpp"
 #include "cases/simulate/printed_number.hpp"
 #include "cases/simulate/result_folder.hpp"
 #include "cases/simulate/simulation_json.hpp"
+#include "cases/simulate/stages_csv.hpp"
 #include "postprocess/results/json_text.hpp"
 #include "solver/failure.hpp"
 
@@ -51,7 +51,7 @@ void print(const Simulation& simulation, const Files& files, const SimulateOptio
   if (options.json) {
     console.out << postprocess::json_text(simulation_json(simulation));
   } else if (options.csv) {
-    console.out << ladder_csv(simulation);
+    console.out << tables_csv(simulation);
   } else {
     console.out << screens(simulation, files);
   }

@@ -6,6 +6,10 @@
 
 #include "cases/simulate/paragraph.hpp"
 #include "cases/simulate/printed_number.hpp"
+#include "cases/simulate/staged_headline.hpp"
+#include "cases/simulate/stop_clause.hpp"
+#include "cases/simulate/stop_figures.hpp"
+#include "cases/simulate/true_kfs_words.hpp"
 
 namespace ringwright::cases {
 namespace {
@@ -14,42 +18,23 @@ using postprocess::Answer;
 using postprocess::LadderRow;
 using postprocess::ReadsX;
 
-std::string stop_clause(const Answer& answer, const LadderRow& stop) {
-  const std::string time = time_text(stop.time);
-  const std::string water = rounded_up(stop.supply_volume.value * 1e3);
-  if (answer.question.stop_readings > 0 && !answer.stop_rule_met) {
-    return fmt::format("The stop rule is not met by {}, the longest you allow; bring {} L.", time,
-                       water);
-  }
-  return fmt::format("Stop at {}, bring {} L.", time, water);
-}
-
-// "14 mm/h at 10 degC (18 at 20 degC)"
-std::string true_kfs(const Case& what, const Answer& answer) {
-  const double Kfs = answer.question.setup.soil.Ks;
-  const double temperature = what.ground.water_temperature;
-  if (temperature == 20.0) return fmt::format("{} mm/h at 20 degC", mm_per_hour(Kfs));
-  return fmt::format("{} mm/h at {:g} degC ({} at 20 degC)", mm_per_hour(Kfs), temperature,
-                     mm_per_hour(Kfs * answer.question.viscosity_ratio));
-}
-
 std::string first_sentences(const Case& what, const Answer& answer, const LadderRow& stop) {
   return fmt::format(
       "{} The form will say {} mm/h ({} in/h); the true Kfs is {}. Read as Kfs that rate is {} "
       "times the true one; by the one-head formula with alpha* {:g} 1/cm, {} times.",
-      stop_clause(answer, stop), mm_per_hour(stop.rate.value), inch_per_hour(stop.rate.value),
-      true_kfs(what, answer), rounded(stop.reads.rate_as_kfs.value),
+      stop_clause(answer, stop.time), mm_per_hour(stop.rate.value), inch_per_hour(stop.rate.value),
+      true_kfs_words(what, answer), rounded(stop.reads.rate_as_kfs.value),
       answer.question.assumed_alpha_star / 100.0, rounded(stop.reads.one_head.value));
 }
 
 std::string other_sentence(const Case& what, const SoilVariant& variant, const Answer& answer) {
   const LadderRow* stop = stop_of(answer);
   if (stop == nullptr) return fmt::format(" By {}: ended before the stop.", variant.source);
-  const bool missed = answer.question.stop_readings > 0 && !answer.stop_rule_met;
+  const bool missed = has_rule(answer) && !answer.stop_rule_met;
   return fmt::format(" By {}: {} {}, {} L, {} mm/h ({} in/h), true Kfs {}.", variant.source,
                      missed ? "rule not met by" : "stop at", time_text(stop->time),
-                     rounded_up(stop->supply_volume.value * 1e3), mm_per_hour(stop->rate.value),
-                     inch_per_hour(stop->rate.value), true_kfs(what, answer));
+                     rounded_up(water_to_bring(answer) * 1e3), mm_per_hour(stop->rate.value),
+                     inch_per_hour(stop->rate.value), true_kfs_words(what, answer));
 }
 
 std::string spread(const AnsweredTest& answered, postprocess::Figure ReadsX::*reading) {
@@ -86,6 +71,9 @@ std::string comparison(const Case& what, const AnsweredTest& answered) {
 
 std::string ended_early(const Answer& answer) {
   const auto& readings = answer.record.readings;
+  if (answer.ended_early && readings.empty()) {
+    return "The water is used up before the first reading: bring more, or a smaller ring.";
+  }
   return fmt::format("Ended before the stop of the test: no figures for it. {}",
                      readings.empty()
                          ? "There is no reading yet."
@@ -97,6 +85,7 @@ std::string ended_early(const Answer& answer) {
 std::string headline(const Case& what, const AnsweredTest& answered) {
   const LadderRow* stop = stop_of(answered.answers.front());
   if (stop == nullptr) {
+    if (stop_time(answered.answers.front())) return staged_headline(what, answered);
     return paragraph(ended_early(answered.answers.front()), "  ", "  ");
   }
   std::string text = paragraph(first_sentences(what, answered.answers.front(), *stop), "  ", "  ");

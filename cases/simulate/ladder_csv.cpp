@@ -4,19 +4,15 @@
 
 #include <string_view>
 
+#include "cases/simulate/csv_field.hpp"
+#include "postprocess/reading/true_kfs.hpp"
+
 namespace ringwright::cases {
 namespace {
 
 constexpr double mm_per_h = 3.6e6;
 constexpr double in_per_h = 3600.0 / 0.0254;
 constexpr double litres_per_m3 = 1e3;
-
-// A field that spreadsheets take as it stands.
-std::string csv_field(std::string_view text) {
-  std::string result = "\"";
-  for (const char c : text) result += c == '"' ? std::string("\"\"") : std::string(1, c);
-  return result + "\"";
-}
 
 std::string figures(double rate, const postprocess::ReadsX& reads, double Kfs, double ratio) {
   std::string text = fmt::format("{:.12g},{:.12g}", rate * mm_per_h, rate * in_per_h);
@@ -28,7 +24,7 @@ std::string figures(double rate, const postprocess::ReadsX& reads, double Kfs, d
 }
 
 std::string rows_of(const std::string& front, const postprocess::Answer& answer) {
-  const double Kfs = answer.question.setup.soil.Ks;
+  const double Kfs = postprocess::true_kfs(answer.question);
   const double ratio = answer.question.viscosity_ratio;
   std::string text;
   for (const postprocess::LadderRow& row : answer.ladder) {

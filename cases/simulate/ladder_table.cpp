@@ -4,6 +4,8 @@
 
 #include "cases/simulate/printed_number.hpp"
 #include "cases/simulate/simulation.hpp"
+#include "cases/simulate/stop_figures.hpp"
+#include "postprocess/reading/true_kfs.hpp"
 
 namespace ringwright::cases {
 namespace {
@@ -23,7 +25,8 @@ std::string row(std::string_view mark, std::string_view time, double rate, std::
 }
 
 std::string_view stop_remark(const Answer& answer) {
-  if (answer.question.stop_readings == 0) return "you stop here";
+  if (answer.ended_early) return "the water is used up";
+  if (!has_rule(answer)) return "you stop here";
   return answer.stop_rule_met ? "your rule stops here" : "rule not met; you stop";
 }
 
@@ -35,13 +38,24 @@ std::string heading() {
                      "in/h", "L", "rate", "formula", "formula+", "steady");
 }
 
+// The formula knows one ring only.
+std::string_view outer_note(const Answer& answer) {
+  return answer.question.setup.outer_ring
+             ? "    the formula is made for one ring; beside an outer ring it takes off too much\n"
+               "    rate and water are those of the inner ring\n"
+             : "";
+}
+
 std::string notes(const Answer& answer) {
   return fmt::format(
-      "    formula: one head, Reynolds & Elrick 1990, with the assumed alpha* {:g} 1/cm\n"
-      "    formula+: the same with this soil's own capillary length, {}: not available to a crew\n"
-      "    water with the {} L that fill the ring; above steady: not yet steady by so much\n",
-      answer.question.assumed_alpha_star / 100.0, about_cm(answer.own_capillary_length),
-      litres(answer.filling_volume));
+             "    formula: one head, Reynolds & Elrick 1990, with the assumed alpha* {:g} 1/cm\n"
+             "    formula+: the same with this soil's own capillary length, {}: not available to a "
+             "crew\n"
+             "    water with the {} L that fill the ring; above steady: not yet steady by so "
+             "much\n",
+             answer.question.assumed_alpha_star / 100.0, about_cm(answer.own_capillary_length),
+             litres(answer.filling_volume)) +
+         std::string(outer_note(answer));
 }
 
 std::string kfs_row(std::string_view name, double Kfs, double viscosity_ratio, double factor,
@@ -87,7 +101,7 @@ std::string ladder_table(const Answer& answer) {
 std::string reading_table(const Answer& answer, double temperature) {
   const LadderRow* stop = stop_of(answer);
   if (stop == nullptr) return "";
-  const double Kfs = answer.question.setup.soil.Ks;
+  const double Kfs = postprocess::true_kfs(answer.question);
   const double ratio = answer.question.viscosity_ratio;
   const bool two = temperature != 20.0;
   const ReadsX& reads = stop->reads;

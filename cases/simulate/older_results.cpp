@@ -12,8 +12,8 @@ namespace {
 namespace fs = std::filesystem;
 
 constexpr int kDeepest = 2;  // test / source / file
-constexpr std::array<std::string_view, 4> kNames = {"record.csv", "answer.json", "fields.h5",
-                                                    "fields.xdmf"};
+constexpr std::array<std::string_view, 5> kNames = {"record.csv", "answer.json", "fields.h5",
+                                                    "fields.xdmf", "stages.csv"};
 
 bool is_result(const fs::directory_entry& entry) {
   const std::string name = entry.path().filename().string();

@@ -80,6 +80,7 @@ std::string time_text(double seconds) {
   const long minutes = std::lround(seconds / 60.0);
   const long hours = minutes / 60;
   if (hours == 0) return fmt::format("{} min", minutes);
+  if (hours >= 96 && minutes % (24 * 60) == 0) return fmt::format("{} days", hours / 24);
   if (minutes % 60 == 0) return fmt::format("{} h", hours);
   return fmt::format("{} h {} min", hours, minutes % 60);
 }

@@ -24,7 +24,8 @@ std::string centimetres(double length);   ///< [m] as "30"; four digits: given l
 std::string about_cm(double length);      ///< [m] as "30 cm", rounded
 std::string flow(double value);           ///< [m3/s] as "40 mL/min" or "1.2 L/min"
 
-/// A time that is known exactly [s]: "45 s", "30 min", "2 h 30 min".
+/// A time that is known exactly [s]: "45 s", "30 min", "2 h 30 min", from four
+/// days on "30 days".
 std::string time_text(double seconds);
 /// A time that is known roughly [s]: "7.5 h", "12.5 days".
 std::string about_time(double seconds);

@@ -10,6 +10,7 @@
 #include "cases/simulate/ladder_csv.hpp"
 #include "cases/simulate/older_results.hpp"
 #include "cases/simulate/resolved_case.hpp"
+#include "cases/simulate/stages_csv.hpp"
 #include "cases/simulate/version.hpp"
 #include "postprocess/results/atomic_file.hpp"
 #include "postprocess/results/result_files.hpp"
@@ -117,10 +118,11 @@ std::vector<std::vector<fs::path>> write_result_folder(const fs::path& folder,
     files.push_back(write_test(folder, simulation, answered, origin));
     screens += first_screen(simulation.what, answered) + "\n";
   }
-  const std::vector<std::pair<fs::path, std::string>> common = {
+  std::vector<std::pair<fs::path, std::string>> common = {
       {folder / "summary.txt", screens},
       {folder / "ladder.csv", ladder_csv(simulation)},
       {folder / "case.yaml", simulation.what.text}};
+  if (has_stages(simulation)) common.emplace_back(folder / "stages.csv", stages_csv(simulation));
   for (const auto& [path, content] : common) postprocess::write_atomically(path, content);
   if (!files.empty()) {
     auto& first = files.front();

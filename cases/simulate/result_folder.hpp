@@ -2,9 +2,9 @@
 /// Where the files of a simulation go, and their writing.
 ///
 /// At the top of the folder stand what concerns all tests: summary.txt (the first screens),
-/// ladder.csv, case.yaml (the case as read). The files of one answer (record.csv, answer.json,
-/// fields.h5, fields.xdmf) stand beside them when there is one answer only, else in a folder per
-/// test and per source of the soil, as far as there are several.
+/// ladder.csv, case.yaml (the case as read), and stages.csv where a test has stages. The files of
+/// one answer (record.csv, answer.json, fields.h5, fields.xdmf) stand beside them when there is one
+/// answer only, else in a folder per test and per source of the soil, as far as there are several.
 
 #include <filesystem>
 #include <vector>

@@ -3,19 +3,23 @@
 #include <fmt/format.h>
 
 #include <algorithm>
+#include <set>
+#include <string>
 
+#include "cases/simulate/ground_words.hpp"
 #include "cases/simulate/paragraph.hpp"
 #include "cases/simulate/printed_number.hpp"
+#include "cases/simulate/stop_figures.hpp"
 #include "models/soil/van_genuchten.hpp"
 
 namespace ringwright::cases {
 namespace {
 
 using postprocess::Answer;
-using postprocess::LadderRow;
 
 std::string steady_sentence(const Answer& answer) {
-  if (answer.interrupted) return "";
+  // Only a head that is constant from start to end has one steady flow.
+  if (answer.interrupted || answer.ladder.empty()) return "";
   const std::string time = about_time(answer.time_to_steady.time);
   return answer.time_to_steady.beyond
              ? fmt::format(" Not within 5 % of steady even after {}.", time)
@@ -66,10 +70,10 @@ double worst_balance(const AnsweredTest& answered) {
 double rate_ratio(const AnsweredTest& answered) {
   double least = 0.0, most = 0.0;
   for (const Answer& answer : answered.answers) {
-    const LadderRow* stop = stop_of(answer);
-    if (stop == nullptr || !(stop->rate.value > 0.0)) continue;
-    least = most == 0.0 ? stop->rate.value : std::min(least, stop->rate.value);
-    most = std::max(most, stop->rate.value);
+    const double rate = rate_at_stop(answer).value;
+    if (!(rate > 0.0)) continue;
+    least = most == 0.0 ? rate : std::min(least, rate);
+    most = std::max(most, rate);
   }
   return least > 0.0 ? most / least : 1.0;
 }
@@ -84,7 +88,7 @@ std::string wetted_error_words(const Answer& answer) {
 std::string numerical_words(const Case& what, const AnsweredTest& answered) {
   const bool met = std::all_of(answered.answers.begin(), answered.answers.end(),
                                [](const Answer& answer) { return answer.accuracy_met; });
-  if (answered.answers.back().interrupted && answered.answers.back().ladder.empty()) {
+  if (answered.answers.back().interrupted && !stop_time(answered.answers.back())) {
     return "the numerical error of an interrupted run is not known.";
   }
   const std::string balance = fmt::format("water balance {:.0e}", worst_balance(answered));
@@ -104,25 +108,25 @@ bool of_another_test(const Assumption& assumption, const Test& test) {
 std::size_t known(const AnsweredTest& answered) {
   return static_cast<std::size_t>(
       std::count_if(answered.answers.begin(), answered.answers.end(),
-                    [](const Answer& answer) { return stop_of(answer) != nullptr; }));
+                    [](const Answer& answer) { return stop_time(answer).has_value(); }));
 }
 
 }  // namespace
 
 std::string stop_details(const Answer& answer) {
-  const LadderRow* stop = stop_of(answer);
-  if (stop == nullptr) return "";
+  const auto stop = stop_time(answer);
+  if (!stop) return "";
   const double area = answer.record.ring_area;
   return paragraph(
              fmt::format("Wetted at {}: {} deep, {} outside the wall. Nothing below that has been "
                          "tested.{}",
-                         time_text(stop->time), about_cm(answer.wetted_depth.value),
+                         time_text(*stop), about_cm(answer.wetted_depth.value),
                          about_cm(answer.wetted_beyond_wall.value), steady_sentence(answer)),
              "  ", "    ") +
          paragraph(fmt::format("Supply: {} L to fill the ring while the soil draws up to {}; at "
                                "the stop {}.",
                                litres(answer.filling_volume), flow(answer.peak_flow),
-                               flow(stop->rate.value * area)),
+                               flow(rate_at_stop(answer).value * area)),
                    "  ", "    ");
 }
 
@@ -132,10 +136,13 @@ std::string assumed_block(const Case& what, const AnsweredTest& answered) {
     text += paragraph(ground_as_run(what.ground.variants[i], answered.answers[i]) + ".",
                       i == 0 ? "  Ground: " : "    ", "    ");
   }
+  text += ground_below(what.ground);
   if (what.assumed.empty()) return text;
   std::string list;
+  std::set<std::string> told;  // layers assume the same things
   for (const Assumption& assumption : what.assumed) {
-    if (of_another_test(assumption, answered.test)) continue;
+    if (of_another_test(assumption, answered.test) || !told.insert(assumption.text).second)
+      continue;
     if (!list.empty()) list += "; ";
     list += assumption.text;
   }
