@@ -38,7 +38,8 @@ std::string lid_lift(const Flag& flag) {
 
 std::string not_for_use(const Flag& flag) {
   return fmt::format(
-      "not for use: highest head the supply can reach {}, lid rated for {}. Fit an overflow or a "
+      "not for use: the highest head the supply can reach is {}, the rating of the lid is {}. Fit "
+      "an overflow or a "
       "relief valve, have lid and clamps rated for it, and state both",
       stated(flag.value), stated(flag.limit));
 }

@@ -22,7 +22,11 @@ std::string litres_to_bring(const postprocess::Answer& answer) {
 std::string stop_clause(const postprocess::Answer& answer, double time) {
   const std::string at = time_text(time), water = litres_to_bring(answer);
   if (answer.ended_early) {
-    return fmt::format("The water is used up and the test ends at {}, after {}.", at, water);
+    const double end = answer.run.ended > time ? answer.run.ended : time;
+    return fmt::format(
+        "The water is used up and the test ends at {}; the last reading is at {}, "
+        "after {}.",
+        time_text(end), at, water);
   }
   if (!answer.stop_rule_met && has_rule(answer)) {
     return fmt::format("The stop rule is not met by {}, the longest you allow; bring {}.", at,

@@ -1,6 +1,7 @@
 #include "postprocess/results/answer_json.hpp"
 
 #include <cmath>
+#include <functional>
 #include <string>
 
 #include "postprocess/reading/true_kfs.hpp"
@@ -69,6 +70,25 @@ json record_json(const models::Record& record) {
   return {{"ring_area", quantity(record.ring_area, "m2")}, {"readings", rows}};
 }
 
+/// A long record takes least room by columns.
+json column_json(const models::Record& record, const char* unit,
+                 const std::function<double(std::size_t)>& of) {
+  json values = json::array();
+  for (std::size_t i = 0; i < record.readings.size(); ++i) values.push_back(of(i));
+  return {{"unit", unit}, {"values", std::move(values)}};
+}
+
+json as_read_json(const models::Record& read) {
+  const auto& rows = read.readings;
+  return {{"time", column_json(read, "s", [&](std::size_t i) { return rows[i].time; })},
+          {"interval", column_json(read, "s", [&](std::size_t i) { return rows[i].interval; })},
+          {"volume", column_json(read, "m3", [&](std::size_t i) { return rows[i].volume; })},
+          {"total_volume",
+           column_json(read, "m3", [&](std::size_t i) { return rows[i].total_volume; })},
+          {"rate", column_json(read, "m/s", [&](std::size_t i) { return read.rate(i); })},
+          {"head", column_json(read, "m", [&](std::size_t i) { return rows[i].head; })}};
+}
+
 json ladder_json(const Answer& answer) {
   json rows = json::array();
   for (const auto& rung : answer.ladder) {
@@ -124,7 +144,7 @@ nlohmann::json to_json(const Answer& answer) {
               {"own_capillary_length", quantity(answer.own_capillary_length, "m")},
               {"numerics", numerics_json(answer)},
               {"interrupted", answer.interrupted}};
-  all["as_read"] = record_json(answer.as_read);
+  all["as_read"] = as_read_json(answer.as_read);
   add_protocol(all, answer);
   return all;
 }

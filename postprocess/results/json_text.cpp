@@ -24,8 +24,11 @@ std::string line(const json& value) {
   return value.dump(-1, ' ', false, json::error_handler_t::replace);
 }
 
+// A long list with its unit.
+bool is_column(const json& value) { return value.is_object() && value.contains("values"); }
+
 void put(const json& value, std::size_t indent, bool in_list, std::string& text) {
-  if (value.empty() || levels(value) <= (in_list ? 2 : 1)) {
+  if (value.empty() || levels(value) <= (in_list || is_column(value) ? 2 : 1)) {
     text += line(value);
     return;
   }

@@ -58,9 +58,9 @@ TEST_CASE("the root says what the file is") {
   CHECK(reader.attribute("/", "format") == "ringwright-fields");
   CHECK(reader.number_attribute("/", "format_version") == 1);
   CHECK(reader.attribute("/", "source") == "Ringwright 0.1.0");
-  CHECK(reader.created_order("/") ==
-        Names{"fields", "totals", "record", "ladder", "figures", "as_read", "stages", "pairs",
-              "verdicts", "flags", "events", "water", "provenance"});
+  CHECK(reader.created_order("/") == Names{"fields", "totals", "record", "ladder", "figures",
+                                           "as_read", "stages", "pairs", "verdicts", "flags",
+                                           "events", "water", "provenance"});
 }
 
 TEST_CASE("mesh and snapshots come back bit for bit") {

@@ -50,9 +50,14 @@ TEST_CASE("stages and pairs come back bit for bit") {
 TEST_CASE("the record as read stands beside the true one") {
   const Answer answer = eventful_answer();
   const json found = written_and_read(answer);
+  const json& read = found.at("as_read");
+  CHECK(read.at("volume").at("unit") == "m3");
+  CHECK(read.at("rate").at("unit") == "m/s");
   for (std::size_t i = 0; i < 2; ++i) {
-    check(found.at("as_read").at("readings").at(i).at("volume"), answer.as_read.readings[i].volume,
-          "m3");
+    CHECK(read.at("time").at("values").at(i) == answer.as_read.readings[i].time);
+    CHECK(read.at("volume").at("values").at(i) == answer.as_read.readings[i].volume);
+    CHECK(read.at("rate").at("values").at(i) == answer.as_read.rate(i));
+    CHECK(read.at("head").at("values").at(i) == answer.as_read.readings[i].head);
     check(found.at("record").at("readings").at(i).at("volume"), answer.record.readings[i].volume,
           "m3");
   }
@@ -105,10 +110,13 @@ TEST_CASE("the true Kfs is the one the question names") {
 
 TEST_CASE("a long list has one line per row, and reads back the same") {
   const json row = {{"time", {{"value", 1.0}, {"unit", "s"}}}, {"mark", true}};
-  const json document = {{"readings", {row, row}}, {"deep", {{"a", {{"b", {{"c", 1}}}}}}}};
+  const json document = {{"column", {{"unit", "s"}, {"values", {1, 2, 3}}}},
+                         {"readings", {row, row}},
+                         {"deep", {{"a", {{"b", {{"c", 1}}}}}}}};
   const std::string text = json_text(document);
   CHECK(json::parse(text) == document);
   CHECK(text == R"({
+  "column": {"unit":"s","values":[1,2,3]},
   "deep": {
     "a": {
       "b": {"c":1}
