@@ -109,8 +109,11 @@ TestRun TestAttempt::run(const StepObserver& observer) {
     }
     integrator_.totals_at(t, totals_, rates_);
     if (!rings_.see(flow_, t, integrator_.u(), totals_)) continue;
+    // A ring that has turned is in its next leg, which a test that is over does not begin.
+    const double ponds_defect = pond_defect();
     rings_.turn(flow_, t, integrator_.u(), totals_);
     over = rings_.test_is_over();
+    if (over) ponds_defect_at_turn_ = ponds_defect;
     if (over) break;
     if (t < end) {
       end_leg(t);
@@ -183,7 +186,7 @@ double TestAttempt::pond_defect() {
 void TestAttempt::finish() {
   const double t = integrator_.time();
   run_.ended = t;
-  const double ponds_defect = pond_defect();
+  const double ponds_defect = ponds_defect_at_turn_ ? *ponds_defect_at_turn_ : pond_defect();
   end_leg(t);
   double out = 0.0;
   for (std::size_t k = 0; k < mesh_.patches.size(); ++k) out += before_leg_[k];

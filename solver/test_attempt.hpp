@@ -1,6 +1,7 @@
 #pragma once
 /// One run of a test on one domain: mesh, flow, rings and integrator put together.
 
+#include <optional>
 #include <vector>
 
 #include "solver/domain.hpp"
@@ -37,6 +38,7 @@ class TestAttempt {
   void finish();
   double stored() const;
 
+  std::optional<double> ponds_defect_at_turn_;  // of the turn that ended the test [m3]
   const TestSetup& setup_;
   CellsAndFaces mesh_;
   RingPatches patches_;

@@ -154,6 +154,7 @@ TEST_CASE("an empty reservoir: the test goes on, ends, or waits for the next", "
     CHECK(count(r, EventKind::test_ended) == 1);
     CHECK(r.ended < s.duration);
     CHECK(r.ended == first(r, EventKind::reservoir_empty));
+    CHECK(r.statistics.balance_error < 1e-6);
   }
   SECTION("waits") {
     s.program.supply.when_empty = models::WhenEmpty::refill;
