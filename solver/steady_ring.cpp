@@ -11,6 +11,7 @@
 #include "solver/ground_materials.hpp"
 #include "solver/mesh/ring_mesh.hpp"
 #include "solver/ring_patches.hpp"
+#include "solver/settle.hpp"
 
 namespace ringwright::solver {
 namespace {
@@ -51,6 +52,19 @@ std::vector<Condition> conditions_of(const TestSetup& setup, const SteadyHeads& 
   return conditions;
 }
 
+// Start of the long way: drained ground, at rest over a water table.
+std::vector<double> drained_ground(const TestSetup& setup, const CellsAndFaces& mesh,
+                                   const FlowSystem& flow) {
+  constexpr double kDrained = -10.0;  // [m]
+  std::vector<double> u;
+  for (int i = 0; i < flow.cells(); ++i) {
+    const double z = mesh.elevation[static_cast<std::size_t>(i)];
+    const double head = setup.water_table ? -*setup.water_table - z : kDrained;
+    u.push_back(flow.u_of_head(i, std::max(head, kDrained)));
+  }
+  return u;
+}
+
 TestSetup setup_of(const SteadyRing& problem) {
   TestSetup setup;
   setup.soil = problem.soil;
@@ -71,7 +85,8 @@ SteadyFlow steady_flow(const TestSetup& setup, const SteadyHeads& heads,
   const RingPatches patch = ring_patches(mesh);
   std::vector<double> Phi = first_potentials(setup, heads, mesh, materials);
   FlowSystem flow(mesh, materials, conditions_of(setup, heads, mesh, patch));
-  const SteadyResult found = solve_steady(flow, Phi);
+  SteadyResult found = solve_steady(flow, Phi);
+  if (!found.converged) found = settle(flow, drained_ground(setup, mesh, flow));
   if (!found.converged)
     throw SolverFailure(
         "no steady flow found after " + std::to_string(found.iterations) + " Newton iterations",

@@ -4,7 +4,8 @@
 ///
 /// The unknown is the flux potential Phi of each cell. In it the capillary flow is linear and
 /// only gravity, K(Phi), is not (for a Gardner soil it is linear too), so that Newton's method
-/// converges from a rough start; where it does not, a pseudo-time term is added and taken back.
+/// converges from a rough start; where it does not, a pseudo-time term is added and taken back,
+/// and where that stalls (coarse under fine layers) the ground is let run (settle.hpp).
 /// The far field is drained and dry, or hydrostatic to a water table: the steady flow does not
 /// depend on the moisture before the test.
 

@@ -194,6 +194,7 @@ double CurveTable::head_of_u(double u) const {
 }
 
 double CurveTable::u_of_potential(double Phi) const {
+  if (std::isnan(Phi)) return Phi;  // no bin is its own
   if (Phi >= entry_potential_) return entry_ + (Phi - entry_potential_);
   const bool dry = Phi < switch_potential_;
   const std::vector<Bin>& bins = dry ? dry_ : wet_;

@@ -39,7 +39,8 @@ double SwitchedNewton::residual(std::span<const double> W, std::span<const doubl
     total_volume += V[i];
   }
   for (double q : flow_.patch_outflow()) through += std::abs(q);
-  imbalance_ = (std::abs(sum) + ponds) / (tolerances_.balance * through + kRoundOff * c * total_volume);
+  imbalance_ =
+      (std::abs(sum) + ponds) / (tolerances_.balance * through + kRoundOff * c * total_volume);
   return worst;
 }
 

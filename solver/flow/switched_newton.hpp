@@ -8,10 +8,10 @@
 /// theta = theta(h) identically and nothing is ever extrapolated in h across a front.
 ///
 /// The convergence test is a maximum over the cells, not a mean (and, for the water balance, the
-/// sum of the defects, and that of every pond, against the flow through the boundary): a mean over a graded mesh
-/// is diluted by idle cells and accepts steps whose front is unconverged. The matrix is
-/// kept while it contracts well and refreshed within the iteration when it does not; a
-/// fresh matrix that contracts badly is no failure by itself.
+/// sum of the defects, and that of every pond, against the flow through the boundary): a mean over
+/// a graded mesh is diluted by idle cells and accepts steps whose front is unconverged. The matrix
+/// is kept while it contracts well and refreshed within the iteration when it does not; a fresh
+/// matrix that contracts badly is no failure by itself.
 
 #include <span>
 #include <vector>
