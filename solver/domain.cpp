@@ -47,7 +47,7 @@ std::vector<double> heads(const TestSetup& setup) {
 double fillable_of(const TestSetup& setup, std::size_t layer) {
   const models::Soil& soil = layer_soil(setup, static_cast<int>(layer));
   const double top = layer == 0 ? 0.0 : setup.layers_below[layer - 1].top;
-  if (const auto table = setup.water_table ? setup.water_table : setup.hydrostatic_to)
+  if (const auto table = setup.water_table)
     return std::max(fillable(soil, top - *table), kLeastFillable);
   if (layer == 0) return fillable(soil, setup.initial_head);
   return std::max(fillable(soil, setup.layers_below[layer - 1].initial_head), kLeastFillable);

@@ -57,8 +57,7 @@ std::vector<Material> ground_materials(const TestSetup& setup,
 }
 
 double head_before(const TestSetup& setup, int soil_index, double elevation) {
-  if (const auto table = setup.water_table ? setup.water_table : setup.hydrostatic_to)
-    return -*table - elevation;
+  if (setup.water_table) return -*setup.water_table - elevation;
   int layer = soil_index;
   if (setup.gap && soil_index == gap_index(setup))
     layer = layer_at(setup, -elevation);

@@ -38,7 +38,7 @@ double shortest_capillary_length(const TestSetup& setup, double uppermost) {
 
 // What the least fillable of the soils can still take, where it can take anything.
 double fillable(const TestSetup& setup) {
-  const auto table = setup.water_table ? setup.water_table : setup.hydrostatic_to;
+  const auto table = setup.water_table;
   const auto left = [](const models::Soil& soil, double head) {
     return soil.theta_s - soil.water_content(head);
   };

@@ -35,11 +35,9 @@ struct TestSetup {
   models::PondProgram outer_program = {};  ///< of the outer ring; no stages: `pond_head` held
 
   // more ground
-  std::vector<models::Layer> layers_below = {};         ///< ascending; their tops below the surface
-  std::optional<double> water_table = std::nullopt;     ///< depth [m]; the ground is hydrostatic
-                                                        ///< to it and stays so far outside
-  std::optional<double> hydrostatic_to = std::nullopt;  ///< depth of a table that only shapes the
-                                                        ///< state before the test [m]
+  std::vector<models::Layer> layers_below = {};      ///< ascending; their tops below the surface
+  std::optional<double> water_table = std::nullopt;  ///< depth [m]; the ground is hydrostatic
+                                                     ///< to it and stays so far outside
   std::optional<models::DisturbedSoil> disturbed = std::nullopt;
   std::optional<models::WallGap> gap = std::nullopt;
 };

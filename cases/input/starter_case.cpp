@@ -19,7 +19,7 @@ ground:
   # minimum capillary height: -2 cm      # of the van Genuchten curve
   # test level: 60 cm below ground       # layers and water table count from the ground
   # layers: clay loam, wet from 5 ft down
-  # wall gap: 0.2 mm             # what driving the ring may do; or
+  # wall gap: 0.05 mm             # what driving the ring may do; or
   # disturbed: { width: 1 cm, Ks x: 0.3 }
   #
   # Instead of the texture you may give the soil

@@ -28,8 +28,8 @@ void add_ground(const Ground& ground, std::size_t variant, double viscosity_rati
     setup.layers_below.push_back({layer.top, at_temperature(soil, viscosity_ratio),
                                   initial_head_of(layer, soil), layer.name});
   }
-  setup.water_table = ground.water_table;
-  if (!ground.water_table) setup.hydrostatic_to = ground.moisture.hydrostatic_to;
+  // ground at rest over a table has that table: it stays where it is
+  setup.water_table = ground.water_table ? ground.water_table : ground.moisture.hydrostatic_to;
   setup.disturbed = ground.disturbed;
   setup.gap = ground.gap;
 }

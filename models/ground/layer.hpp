@@ -22,7 +22,7 @@ struct DisturbedSoil {
   double factor = 1.0;  ///< on Ks [-], > 0
 };
 
-/// An open gap along both sides of a wall, down to its foot, through which water runs as between
+/// An open gap along both sides of a wall and round its foot, through which water runs as between
 /// two plates. See models/ground/wall_gap.hpp for its curves.
 struct WallGap {
   double width = 0.0;  ///< on each side [m], > 0

@@ -42,8 +42,8 @@ class RingDriver {
 
   /// Sets condition and feed for the leg that begins at t [s].
   void begin_leg(FlowSystem& flow, double t) const;
-  /// Length of the ramp the leg begins with [s]; 0: none.
-  double ramp_length() const { return mode_ == Mode::prescribed ? ramp_.to - leg_start_ : 0.0; }
+  /// A first step that does justice to the ramp the leg begins with [s]; 0: no ramp.
+  double first_step() const;
   /// Head at the time last seen [m]; the pond starts its leg from it.
   double head() const { return level_; }
 
@@ -81,6 +81,7 @@ class RingDriver {
   bool in_spell(double t) const;
   double head_at(double t) const;
 
+  bool ramp_is_short() const;
   bool only_a_ramp_ends(double t) const;
   bool watch_level(double t);
   bool watch_reservoir(double t, double used);

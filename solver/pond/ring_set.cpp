@@ -60,12 +60,11 @@ void RingSet::begin_leg(FlowSystem& flow, std::span<double> u, double t) const {
 }
 
 double RingSet::first_step() const {
-  constexpr double kShare = 0.5;  // of the ramp
   double shortest = 0.0;
   for (const RingDriver& ring : rings_)
-    if (const double ramp = ring.ramp_length(); ramp > 0.0)
-      shortest = shortest > 0.0 ? std::min(shortest, ramp) : ramp;
-  return kShare * shortest;
+    if (const double step = ring.first_step(); step > 0.0)
+      shortest = shortest > 0.0 ? std::min(shortest, step) : step;
+  return shortest;
 }
 
 double RingSet::next_stop(double t) const {

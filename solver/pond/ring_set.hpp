@@ -24,7 +24,7 @@ class RingSet {
 
   /// Sets conditions and feeds, and the ponds' unknowns in u.
   void begin_leg(FlowSystem& flow, std::span<double> u, double t) const;
-  /// A first step that resolves the shortest ramp the leg begins with [s]; 0: no ramp.
+  /// A first step that does justice to the ramps the leg begins with [s]; 0: no ramp.
   double first_step() const;
   /// The earliest time, after t, at which something is to be done or expected [s].
   double next_stop(double t) const;

@@ -11,13 +11,14 @@
 #include "validation/benchmark/cpu_time.hpp"
 #include "validation/benchmark/measured_simulation.hpp"
 #include "validation/benchmark/problem_export.hpp"
+#include "validation/benchmark/staged_cost.hpp"
 
 namespace ringwright::validation {
 namespace {
 
 struct Options {
   std::string name = "T1", accuracy = "1%", part = "run", output;
-  bool cached = false, once = false;
+  bool cached = false, once = false, staged = false;
 };
 
 double fraction(const std::string& text) {
@@ -72,6 +73,7 @@ void print_table() {
              "steady", "err%", "answer", "least", "refin", "est err%", "pair CPU+%");
   for (const BenchmarkCase& c : cases)
     for (double accuracy : {0.01, 0.003}) print_rest(c, accuracy);
+  print_staged_costs();
 }
 
 // Exactly one of what is asked, for a profiler.
@@ -109,11 +111,14 @@ int run(int argc, char** argv) {
   app.add_flag("--once", options.once, "one run of one case and nothing printed");
   app.add_flag("--cached", options.cached, "with --once: the table of the soil is made before");
   app.add_option("--part", options.part, "with --once: steady or answer instead of the run");
+  app.add_flag("--staged", options.staged, "only the table of stages and second rings");
   app.add_flag("--export", exporting, "the semi-discrete problem of one case as JSON");
   app.add_option("--output", options.output, "with --export: file instead of standard output");
   CLI11_PARSE(app, argc, argv);
   if (exporting)
     export_problem(options);
+  else if (options.staged)
+    print_staged_costs();
   else if (options.once)
     run_once(benchmark_case_without_own_run(options.name), options);
   else

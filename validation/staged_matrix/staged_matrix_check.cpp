@@ -11,6 +11,9 @@
 #include <string>
 #include <vector>
 
+#include "models/estimators/two_head.hpp"
+#include "postprocess/reading/answer_question.hpp"
+#include "postprocess/reading/companion_runs.hpp"
 #include "solver/failure.hpp"
 #include "solver/flow/curve_table.hpp"
 #include "solver/resolution.hpp"
@@ -41,7 +44,114 @@ double quantile(std::vector<double> v, double share) {
   return v[static_cast<std::size_t>(share * static_cast<double>(v.size() - 1))];
 }
 
+// A promised figure and what a run five times as accurate says of it.
+struct Compared {
+  std::string what;
+  double value, error, exact;
+  bool is_right() const { return std::abs(value - exact) <= error; }
+};
+
+postprocess::Question question_of(const StagedCase& c) {
+  postprocess::Question q;
+  q.setup = c.setup;
+  q.setup.times.clear();
+  q.reading_interval = c.setup.duration / 20;
+  q.assumed_alpha_star = 12.0;
+  q.accuracy = 0.01;
+  q.find_influence = false;
+  return q;
+}
+
+class Comparison {
+ public:
+  Comparison(const postprocess::Answer& answer, const solver::TestRun& truth)
+      : answer_(answer), truth_(truth) {
+    for (const postprocess::StageReading& stage : answer.stages) add_stage(stage);
+    for (const postprocess::HeadPair& pair : answer.pairs) add_pair(pair);
+    const solver::Sample& end = postprocess::sample_at(truth, answer.record.readings.back().time);
+    add("soil", answer.water.soil, end.water.soil);
+    add("supply", answer.water.supply, end.water.supply);
+    if (answer.outer_water) add("outer soil", answer.outer_water->soil, end.outer_water.soil);
+  }
+  const std::vector<Compared>& figures() const { return figures_; }
+
+ private:
+  void add(const std::string& what, const postprocess::Figure& f, double exact) {
+    figures_.push_back({what, f.value, f.error, exact});
+  }
+  double exact_rate(const postprocess::StageReading& stage) const {
+    for (const models::Reading& r : answer_.record.readings)
+      if (std::abs(r.time - stage.to) <= 1e-9 * stage.to) {
+        const double from = r.time - r.interval;
+        const double before = from > 1e-9 * r.time ? postprocess::volume_at(truth_, from) : 0.0;
+        return (postprocess::volume_at(truth_, r.time) - before) / r.interval /
+               answer_.record.ring_area;
+      }
+    throw std::logic_error("a stage without a reading at its end");
+  }
+  void add_stage(const postprocess::StageReading& stage) {
+    add("rate of a stage", stage.rate, exact_rate(stage));
+    const double before = stage.from > 0.0 ? postprocess::volume_at(truth_, stage.from) : 0.0;
+    add("volume of a stage", stage.soil_volume, postprocess::volume_at(truth_, stage.to) - before);
+  }
+  void add_pair(const postprocess::HeadPair& pair) {
+    const models::SingleRing& ring = answer_.question.setup.ring;
+    const auto reading = [&](std::size_t k) {
+      const postprocess::StageReading& stage = answer_.stages[k];
+      return models::HeadAndRate{answer_.question.setup.program.stages[stage.stage].head,
+                                 exact_rate(stage)};
+    };
+    const double exact = models::two_head(reading(pair.first), reading(pair.second),
+                                          models::nimmo_shape_length(ring.radius, ring.insertion))
+                             .Kfs;
+    add("Kfs of a pair", pair.kfs, exact);
+  }
+
+  const postprocess::Answer& answer_;
+  const solver::TestRun& truth_;
+  std::vector<Compared> figures_;
+};
+
+solver::TestRun finer_run(const postprocess::Answer& a, double accuracy) {
+  solver::TestSetup setup = a.question.setup;
+  setup.times.clear();
+  for (const solver::Sample& s : a.run.samples) setup.times.push_back(s.time);
+  const solver::CurveTable table(setup.soil.curves);
+  return solver::run_test(setup, solver::resolution_for(setup, accuracy, table.capillary_length(),
+                                                        0.05 * setup.duration));
+}
+
 }  // namespace
+
+TEST_CASE("every tenth of the random tests is right within its own printed error",
+          "[staged][slow]") {
+  int right = 0, answered = 0, met = 0;
+  std::vector<double> ratio;
+  for (std::uint64_t k = 0; k < 500; k += 10) {
+    // the tenths go through all kinds in turn
+    const StagedCase c = staged_case(k + (k / 10) % kDoings);
+    CAPTURE(c.name);
+    const postprocess::Answer a = postprocess::answer(question_of(c));
+    const solver::TestRun truth = finer_run(a, 0.002);
+    ++answered;
+    met += a.accuracy_met;
+    bool all = true;
+    const Comparison comparison(a, truth);
+    for (const Compared& f : comparison.figures()) {
+      all = all && f.is_right();
+      if (f.exact != f.value) ratio.push_back(f.error / std::abs(f.exact - f.value));
+      if (!f.is_right())
+        std::cout << fmt::format("{}: {} {:.5g} +- {:.2g}, really {:.5g}\n", c.name, f.what,
+                                 f.value, f.error, f.exact);
+    }
+    right += all;
+  }
+  std::cout << fmt::format(
+      "{} of {} right within their own error, the median error told is {:.1f} times the true one; "
+      "accuracy met by {}\n",
+      right, answered, quantile(ratio, 0.5), met);
+  CHECK(right >= 0.95 * answered);
+}
 
 TEST_CASE("500 random tests of every kind complete and keep their water", "[staged][slow]") {
   const char* more = std::getenv("RINGWRIGHT_STAGED_CASES");
