@@ -79,8 +79,7 @@ std::vector<Key> place_keys() {
        .meaning = "Width of an open gap along both sides of the wall; none if not given.",
        .examples = {"0.05 mm"},
        .dimension = Dimension::length,
-       .range = Range{1e-5, 1e-4,
-                      "0.01 mm to 0.1 mm; through a wider one runs more than the soil drinks"}},
+       .range = Range{1e-5, 2e-3, "0.01 mm to 2 mm"}},
       {.name = "liner",
        .kind = ValueKind::quantity,
        .meaning = "Thickness of a liner from the level of the test down, for the share of it that "

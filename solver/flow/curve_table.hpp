@@ -40,6 +40,14 @@ struct CurvePoint {
   double K, dK;      ///< relative conductivity [-], [1/m]
 };
 
+/// What a cell gives to a face, its flux potential and the gravity flow it drives, over Ks and
+/// transmissibility [m]; never below 0, so that a cell without water gives none (flow_system.hpp).
+/// @param rise weighted height of the cell over the far side [m], negative: below it
+inline double pushed(const CurvePoint& p, double rise) { return std::max(p.Phi + p.K * rise, 0.0); }
+inline double pushed_slope(const CurvePoint& p, double rise) {
+  return p.Phi + p.K * rise > 0.0 ? p.dPhi + p.dK * rise : 0.0;
+}
+
 class CurveTable {
  public:
   explicit CurveTable(std::shared_ptr<const models::Curves> curves);

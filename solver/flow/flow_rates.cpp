@@ -130,7 +130,7 @@ void FlowSystem::net_outflow(std::span<double> out) {
   std::fill(totals_.begin(), totals_.end(), 0.0);
   for (const InnerFace& f : inner_) {
     const CurvePoint &a = point(f.a), &b = point(f.b);
-    const double q = f.conductance * (a.Phi - b.Phi + a.K * f.rise_a + b.K * f.rise_b);
+    const double q = f.conductance * (pushed(a, f.rise_a) - pushed(b, -f.rise_b));
     out[static_cast<std::size_t>(f.a)] += q;
     out[static_cast<std::size_t>(f.b)] -= q;
   }
@@ -172,10 +172,9 @@ void FlowSystem::add_jacobian(std::span<double> values) const {
     at(f.ba) -= da;
     at(f.bb) -= db;
   };
-  for (const InnerFace& f : inner_) {
-    const CurvePoint &a = point(f.a), &b = point(f.b);
-    add(f, f.conductance * (a.dPhi + a.dK * f.rise_a), f.conductance * (-b.dPhi + b.dK * f.rise_b));
-  }
+  for (const InnerFace& f : inner_)
+    add(f, f.conductance * pushed_slope(point(f.a), f.rise_a),
+        -f.conductance * pushed_slope(point(f.b), -f.rise_b));
   for (const MixedFace& f : mixed_) add(f, f.flow.slope_a, f.flow.slope_b);
   for (const OuterFace& f : outer_) at(f.diagonal) += outflow_slope(f);
   add_pond_jacobian(values);

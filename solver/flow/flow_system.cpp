@@ -84,9 +84,8 @@ void FlowSystem::add_face(const Face& f) {
 void FlowSystem::add_outer_face(const BoundaryFace& f) {
   const Material& m = material(f.cell);
   const double w = gravity_weight(f.rise, m.table->capillary_length());
-  outer_.push_back({f.cell, f.patch, 0,
-                    directed_Ks(m.soil, f.horizontal) * f.transmissibility, w * f.rise,
-                    (1 - w) * f.rise, f.area, f.normal_down, f.position});
+  outer_.push_back({f.cell, f.patch, 0, directed_Ks(m.soil, f.horizontal) * f.transmissibility,
+                    w * f.rise, (1 - w) * f.rise, f.area, f.normal_down, f.position});
 }
 
 void FlowSystem::add_pond(const Pond& pond) {

@@ -16,7 +16,10 @@
 /// lambda: w = (1 + coth(p) - 1/p) / 2 with p = dz / (2 lambda), the weight for which the
 /// steady one-dimensional flow of a Gardner soil is exact (exponential fitting; Il'in 1969,
 /// Scharfetter & Gummel 1969). It depends on mesh and soil only, not on the state, so
-/// Newton sees no extra nonlinearity and coarse far-field cells stay monotone.
+/// Newton sees no extra nonlinearity and coarse far-field cells stay monotone. Where a soil's K
+/// falls off faster than its capillary length says, a tall wet cell under a dry one would still
+/// draw water out of it down to nothing: what the lower cell adds to the gravity flow is therefore
+/// not more than what its own capillarity holds back, (1 - w) Kr_b dz <= Phi_b.
 ///
 /// Across a face between two materials Phi differs by material and the Kirchhoff difference is
 /// wrong: there the head at the face is found from equal flow on both sides (material_face.hpp).

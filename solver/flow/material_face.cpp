@@ -15,17 +15,17 @@ class FaceBalance {
   FaceBalance(const HalfFace& a, const HalfFace& b, const CurvePoint& at_a, const CurvePoint& at_b)
       : a_(a),
         b_(b),
-        into_(a.conductance * (at_a.Phi + at_a.K * a.rise_cell)),
-        out_(b.conductance * (-at_b.Phi + at_b.K * b.rise_cell)) {}
+        into_(a.conductance * pushed(at_a, a.rise_cell)),
+        out_(-b.conductance * pushed(at_b, -b.rise_cell)) {}
 
   // q_a - q_b, falling with h
   double operator()(double h) {
     A = a_.table->at_head(h);
     B = b_.table->at_head(h);
-    q_a = into_ + a_.conductance * (-A.Phi + A.K * a_.rise_face);
-    q_b = out_ + b_.conductance * (B.Phi + B.K * b_.rise_face);
-    slope_a = a_.conductance * (-A.dPhi + A.dK * a_.rise_face);
-    slope_b = b_.conductance * (B.dPhi + B.dK * b_.rise_face);
+    q_a = into_ - a_.conductance * pushed(A, -a_.rise_face);
+    q_b = out_ + b_.conductance * pushed(B, b_.rise_face);
+    slope_a = -a_.conductance * pushed_slope(A, -a_.rise_face);
+    slope_b = b_.conductance * pushed_slope(B, b_.rise_face);
     return q_a - q_b;
   }
   double size() const { return std::abs(q_a) + std::abs(q_b) + std::abs(into_) + std::abs(out_); }
@@ -65,8 +65,8 @@ MaterialFlow material_flow(const HalfFace& a, const HalfFace& b, const CurvePoin
                            const CurvePoint& at_b, double& head) {
   FaceBalance f(a, b, at_a, at_b);
   head = face_head(f, head);
-  const double own_a = a.conductance * (at_a.dPhi + at_a.dK * a.rise_cell);
-  const double own_b = b.conductance * (-at_b.dPhi + at_b.dK * b.rise_cell);
+  const double own_a = a.conductance * pushed_slope(at_a, a.rise_cell);
+  const double own_b = -b.conductance * pushed_slope(at_b, -b.rise_cell);
   const double sum = f.slope_b - f.slope_a;
   return {0.5 * (f.q_a + f.q_b), own_a * f.slope_b / sum, -own_b * f.slope_a / sum};
 }

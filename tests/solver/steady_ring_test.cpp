@@ -4,6 +4,8 @@
 #include <memory>
 
 #include "solver/flow/curve_table.hpp"
+#include "solver/ground_materials.hpp"
+#include "solver/resolution.hpp"
 #include "tests/solver/soils.hpp"
 
 using namespace ringwright;
@@ -46,4 +48,33 @@ TEST_CASE("the steady domain is large enough for a tenth of a per cent", "[solve
   wide.radius *= 3, wide.depth *= 3;
   CHECK(usual.ring_flow == Approx(flow_of(ring, 0.05, &wide).ring_flow).epsilon(1e-3));
   CHECK(usual.balance_error < 1e-6);
+}
+
+// Water that stands on a fine layer and spreads under dry ground is where the steady equation is
+// hardest. Meshes of two accuracies must find the same flow.
+TEST_CASE("steady flow on layered ground", "[solver][steady]") {
+  struct Ground {
+    const char *above, *below;
+    double top;
+  };
+  for (const Ground& g : {Ground{"clay", "sand", 0.3}, Ground{"sand", "clay", 0.55},
+                          Ground{"sandy loam", "clay", 0.10}, Ground{"loam", "sand", 0.11},
+                          Ground{"silt", "sand", 0.05}}) {
+    TestSetup s;
+    s.soil = class_soil(g.above);
+    s.initial_head = -3.0;
+    s.ring = {0.15, 0.10};
+    s.pond_head = 0.10;
+    s.duration = 7200.0;
+    s.layers_below.push_back({g.top, class_soil(g.below), -3.0, ""});
+    const auto materials = ground_materials(s);
+    const auto flow = [&](double accuracy) {
+      const Resolution r =
+          resolution_for(s, accuracy, materials.front().table->capillary_length(), 360.0);
+      return steady_flow(s, {s.pond_head}, r, materials).ring_flow;
+    };
+    const double coarse = flow(0.01), fine = flow(0.004);
+    CAPTURE(g.above, g.below, coarse / fine - 1);
+    CHECK(coarse == Approx(fine).epsilon(0.01));
+  }
 }

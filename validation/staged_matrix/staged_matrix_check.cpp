@@ -98,7 +98,7 @@ class Comparison {
     const models::SingleRing& ring = answer_.question.setup.ring;
     const auto reading = [&](std::size_t k) {
       const postprocess::StageReading& stage = answer_.stages[k];
-      return models::HeadAndRate{answer_.question.setup.program.stages[stage.stage].head,
+      return models::HeadAndRate{postprocess::sample_at(truth_, stage.to).water.head,
                                  exact_rate(stage)};
     };
     const double exact = models::two_head(reading(pair.first), reading(pair.second),

@@ -151,6 +151,27 @@ TEST_CASE("saturated layers lie in series", "[solver][flow]") {
   CHECK(std::abs(out[1]) < 1e-9 * expected);
 }
 
+// K of a sand falls off so fast that gravity alone, weighted by the capillary length, would have a
+// wet cell draw water from the dry one above it; hydrostatics says it cannot (textbook).
+TEST_CASE("a tall dry cell over a wet one gives no water", "[solver][flow]") {
+  for (const char* texture : {"sand", "loam", "clay"})
+    for (const char* below : {"sand", "loam", "clay"}) {
+      CellsAndFaces mesh = column_mesh({0.0, -0.08, -0.16});
+      mesh.soil[1] = 1;
+      FlowSystem flow(mesh, {material_of(class_soil(texture)), material_of(class_soil(below))},
+                      std::vector<Condition>(mesh.patches.size()));
+      std::vector<double> out(2);
+      const double driest = flow.bounds(0).driest;
+      for (double head : {-0.005, -0.02, -0.05, -0.1, -0.2}) {
+        const std::vector<double> u = {driest + 1e-12 * std::abs(driest), flow.u_of_head(1, head)};
+        flow.set_state(u);
+        flow.net_outflow(out);
+        CAPTURE(texture, below, head);
+        CHECK(out[0] <= 1e-9 * flow.material(0).soil.Ks);
+      }
+    }
+}
+
 TEST_CASE("horizontal flow takes the anisotropy, vertical flow does not", "[solver][flow]") {
   const CellsAndFaces mesh = without_gravity(plane_mesh({0.0, 0.1, 0.2}, {0.0, -0.1, -0.2}));
   models::Soil soil = class_soil("loam");
