@@ -46,15 +46,22 @@ std::string_view outer_note(const Answer& answer) {
              : "";
 }
 
+// A supply that is limited has not always filled the ring.
+std::string water_note(const Answer& answer) {
+  return answer.question.setup.program.supply.is_limited()
+             ? "water: what the supply gave, into ring and soil"
+             : fmt::format("water with the {} L that fill the ring", litres(answer.filling_volume));
+}
+
 std::string notes(const Answer& answer) {
   return fmt::format(
              "    formula: one head, Reynolds & Elrick 1990, with the assumed alpha* {:g} 1/cm\n"
              "    formula+: the same with this soil's own capillary length, {}: not available to a "
              "crew\n"
-             "    water with the {} L that fill the ring; above steady: not yet steady by so "
+             "    {}; above steady: not yet steady by so "
              "much\n",
              answer.question.assumed_alpha_star / 100.0, about_cm(answer.own_capillary_length),
-             litres(answer.filling_volume)) +
+             water_note(answer)) +
          std::string(outer_note(answer));
 }
 
