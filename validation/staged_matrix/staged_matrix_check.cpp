@@ -51,13 +51,13 @@ struct Compared {
   bool is_right() const { return std::abs(value - exact) <= error; }
 };
 
-postprocess::Question question_of(const StagedCase& c) {
+postprocess::Question question_of(const StagedCase& c, double accuracy) {
   postprocess::Question q;
   q.setup = c.setup;
   q.setup.times.clear();
   q.reading_interval = c.setup.duration / 20;
   q.assumed_alpha_star = 12.0;
-  q.accuracy = 0.01;
+  q.accuracy = accuracy;
   q.find_influence = false;
   return q;
 }
@@ -112,13 +112,13 @@ class Comparison {
   std::vector<Compared> figures_;
 };
 
-// Cells smaller by 0.6 each way than the answer's finest, time steps a fifth as loose: where errors
-// fall with the square of the cells, three times as accurate.
+// Cells half as large each way as the answer's finest, time steps a fifth as loose: where errors
+// fall with the square of the cells, four times as accurate.
 solver::TestRun finer_run(const postprocess::Answer& a) {
   solver::TestSetup setup = a.question.setup;
   setup.times.clear();
   for (const solver::Sample& s : a.run.samples) setup.times.push_back(s.time);
-  solver::Resolution r = a.resolution->scaled(0.6);
+  solver::Resolution r = a.resolution->scaled(0.5);
   r.theta_tolerance *= 0.2;
   return solver::run_test(setup, r);
 }
@@ -127,13 +127,16 @@ solver::TestRun finer_run(const postprocess::Answer& a) {
 
 TEST_CASE("every tenth of the random tests is right within its own printed error",
           "[staged][slow]") {
+  // answers at 3 % are cheap enough for every build; others on request
+  const char* asked = std::getenv("RINGWRIGHT_STAGED_ACCURACY");
+  const double accuracy = asked ? std::strtod(asked, nullptr) : 0.03;
   int right = 0, answered = 0, met = 0;
   std::vector<double> ratio;
   for (std::uint64_t k = 0; k < 500; k += 10) {
     // the tenths go through all kinds in turn
     const StagedCase c = staged_case(k + (k / 10) % kDoings);
     CAPTURE(c.name);
-    const postprocess::Answer a = postprocess::answer(question_of(c));
+    const postprocess::Answer a = postprocess::answer(question_of(c, accuracy));
     const solver::TestRun truth = finer_run(a);
     ++answered;
     met += a.accuracy_met;
