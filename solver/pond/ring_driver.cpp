@@ -13,7 +13,7 @@ constexpr double kSameVolume = 1e-6;  // relative, a reservoir is empty
 constexpr double kSoonest = 1e-3;     // [s], no step is aimed at less
 // Totals are not in the error test: a ramp whose water counts is entered with small steps.
 constexpr double kShortRamp = 0.005;  // of the stage
-constexpr double kStepOfShortRamp = 0.5, kStepOfRamp = 0.03;
+constexpr double kStepOfShortRamp = 1.0, kStepOfRamp = 0.03;
 constexpr double kResume = 1.0;  // [s], ramp from where a fall ended to the head held
 
 }  // namespace
