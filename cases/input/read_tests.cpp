@@ -47,7 +47,8 @@ Test read_test(const LocatedNode::Entry& entry, const Key& grammar, const Sectio
   if (test.outer_ring)
     check_depth(section, "outer insert", test.outer_ring->insertion, ground, reading);
   if (test.lid && !ground.ground.wet_density)
-    reading.assume("ground.wet density", "ground as heavy as grains of 2650 kg/m3 with full pores");
+    reading.assume("ground.wet density",
+                   "ground as heavy as grains of 2650 kg/m3 with pores full, at least 40 % of it");
   read_protocol({section, common}, heads, test, reading);
   return test;
 }

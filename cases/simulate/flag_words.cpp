@@ -3,6 +3,7 @@
 #include <fmt/format.h>
 
 #include <algorithm>
+#include <cmath>
 
 #include "cases/simulate/printed_number.hpp"
 #include "models/ring/lid_lift.hpp"
@@ -28,6 +29,11 @@ std::string of_outer(const Flag& flag) { return flag.outer ? "outer ring: " : ""
 std::string stated(double head) { return head > 0.0 ? about_cm(head) : "not stated"; }
 
 std::string lid_lift(const Flag& flag) {
+  if (!std::isfinite(flag.place))
+    return fmt::format(
+        "the water lifts the lid with {} N ({} kgf) at the highest head set, and with more if the "
+        "supply can reach more, which is not stated: no ballast can be named. State the relief",
+        rounded(flag.value), rounded(flag.value / standard_gravity));
   return fmt::format(
       "the water can lift the lid with {} N ({} kgf), lid and ring weigh {} N. Lay on {} kg, as {} "
       "pieces of at most 20 kg; the clamps carry the lift too. Stay clear of the lid, bleed before "
@@ -92,11 +98,20 @@ std::string reservoir(const Flag& flag) {
       of_outer(flag), litres(flag.limit), time_text(flag.value));
 }
 
+std::string ring_emptied(const Flag& flag) {
+  return fmt::format(
+      "{}the ring has been empty since {}: the last reading is not a rate of the soil. Stop "
+      "before, "
+      "fill up at a threshold, or bring more water",
+      of_outer(flag), time_text(flag.value));
+}
+
 std::string gauge(const Flag& flag, const Answer& answer) {
   const std::string what =
       fmt::format("the last reading is {} divisions of the gauge, {} are wanted",
                   rounded(flag.value), limit_words(flag.limit));
-  if (!(flag.value > 0.0)) return what + ". Use a finer gauge";
+  if (!(flag.value > 0.0))
+    return what + ". Nothing went into the ground in it: the ring was empty, or water came up";
   return what + fmt::format(". Use a finer gauge or read every {}",
                             about_time(answer.question.reading_interval * flag.limit / flag.value));
 }
@@ -120,9 +135,9 @@ std::string rule_not_met(const Flag& flag) {
 std::string sealed(const Flag& flag) {
   return fmt::format(
       "one degree warmer or colder changes the sealed water by {} mL, more than a "
-      "tenth of its daily flow ({} mL). Shade or bury the ring, read at the same "
+      "tenth of its daily flow of {} mL. Shade or bury the ring, read at the same "
       "hour and the same water temperature",
-      rounded(flag.value * 1e6), rounded(flag.limit * 1e6));
+      rounded(flag.value * 1e6), rounded(10 * flag.limit * 1e6));
 }
 
 }  // namespace
@@ -133,6 +148,8 @@ std::string flag_words(const Flag& flag, const Answer& answer) {
       return supply(flag);
     case FlagKind::reservoir_emptied:
       return reservoir(flag);
+    case FlagKind::ring_emptied:
+      return ring_emptied(flag);
     case FlagKind::flow_below_gauge:
       return gauge(flag, answer);
     case FlagKind::surfacing:

@@ -73,7 +73,9 @@ std::string pair_row(const Answer& answer, const HeadPair& pair, bool two) {
   const std::string as_read = pair.physical_as_read ? mm_per_hour(pair.kfs_as_read) : "not usable";
   return kfs_row(pair_name(answer, pair), pair.kfs.value, answer.question.viscosity_ratio, two) +
          fmt::format("   {:>7}   {:>10}{}\n", rounded(pair.reads.value), as_read,
-                     pair.physical ? "" : "  not usable");
+                     pair.physical  ? ""
+                     : pair.arrived ? "  not usable"
+                                    : "  not usable: the level had not come to the head set");
 }
 
 std::string pair_heading(double temperature, bool two) {

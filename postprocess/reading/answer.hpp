@@ -30,7 +30,7 @@ struct Circumstances {
   std::optional<double> sealed_volume;  ///< water in a closed inner ring read by volume [m3]
   std::optional<double> bulk_density;   ///< of the ground over the foot of the wall, with its
                                         ///< water [kg/m3]; none: of grains of 2650 kg/m3 with
-                                        ///< all pores of theta_s full
+                                        ///< all pores full, theta_s of it but at least 40 %
   double water_temperature = 20.0;      ///< [degC]
   double ballast_factor = 1.5;          ///< on the lift (models/ring/lid_lift.hpp) [-]
 };
@@ -85,8 +85,9 @@ struct HeadPair {
   Figure reads;                       ///< kfs over true Kfs [-]
   double kfs_as_read = 0.0;           ///< from rates and heads of the record as read [m/s]; NaN
                                       ///< where both heads were read the same
-  bool physical = true;               ///< Kfs and matric flux potential above 0
+  bool physical = true;               ///< arrived, Kfs and matric flux potential above 0
   bool physical_as_read = true;       ///< the same from the record as read
+  bool arrived = true;                ///< the level was at the head set at the end of both stages
 };
 
 /// Where the water of one ring went until the stop: supply = soil + standing + evaporated +
@@ -103,12 +104,14 @@ struct WaterUse {
 };
 
 enum class FlagKind {
-  supply_exceeded,     ///< value: head lost [m], the most at any reading; limit: head set then [m]
-  reservoir_emptied,   ///< value: first time [s]; limit: its volume [m3]
-  flow_below_gauge,    ///< value: divisions of the gauge in the reading at the stop; limit: least
-  surfacing,           ///< value: water welling up outside [m3]; limit: first time [s]; place [m]
-  piping,              ///< value: H/(2d) [-]; limit: critical exit gradient [-]
-  fracture,            ///< value: water pressure at the foot over the soil's weight there [-]; 1
+  supply_exceeded,    ///< value: head lost [m], the most at any reading; limit: head set then [m]
+  reservoir_emptied,  ///< value: first time [s]; limit: its volume [m3]
+  ring_emptied,      ///< no water stood in the ring in the last reading or part of it; value: since
+                     ///< when [s]
+  flow_below_gauge,  ///< value: divisions of the gauge in the reading at the stop; limit: least
+  surfacing,         ///< value: water welling up outside [m3]; limit: first time [s]; place [m]
+  piping,            ///< value: H/(2d) [-]; limit: critical exit gradient [-]
+  fracture,          ///< value: water pressure at the foot over the soil's weight there [-]; 1
   evaporation_share,   ///< value: evaporation over soil intake in the last reading [-]; limit
   stop_rule_not_met,   ///< value: true rate at the end over steady rate minus 1 [-]
   domain_reached,      ///< the mesh could not be made large enough; value: its depth [m]
@@ -123,7 +126,8 @@ enum class FlagKind {
 struct Flag {
   FlagKind kind = FlagKind::stop_rule_not_met;
   double value = 0.0, limit = 0.0;
-  double place = 0.0;  ///< surfacing: largest radius [m]; lid_lift: ballast to lay on [kg]
+  double place = 0.0;  ///< surfacing: largest radius [m]; lid_lift: ballast to lay on [kg],
+                       ///< NaN where the highest pressure is not stated
   bool outer = false;  ///< of the outer ring
 };
 

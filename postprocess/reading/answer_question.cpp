@@ -28,7 +28,7 @@ constexpr int kMostRefinements = 6;
 // The estimate is two to four times the error: begin finer than the accuracy needs, so that one
 // set of runs mostly does.
 constexpr double kBeginAt = 0.36;
-constexpr int kMostCells = 40000;
+constexpr int kMostCells = 20000;
 constexpr double kPeakInterval = 60.0;  // [s]
 constexpr int kSnapshots = 12;
 // Progress told: the pilot up to the first, the time to steady from the second.

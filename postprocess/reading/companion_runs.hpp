@@ -67,6 +67,13 @@ struct CompanionWork {
   std::vector<solver::SteadyHeads> held;  ///< heads whose steady flow is asked for; may be empty
 };
 
+/// What the error of a rate read at t is held against at least [m3/s]: a twentieth of the mean flow
+/// up to then. A ring that runs dry within a reading has a rate near nothing there, which no mesh
+/// makes relatively exact.
+inline double least_flow(const solver::TestRun& run, double t) {
+  return 0.05 * volume_at(run, t) / t;
+}
+
 /// Runs all of them; with more than one thread side by side, with the same result.
 /// @param observer sees the fine run and may stop all @param keep_going asked by the others,
 /// perhaps from another thread

@@ -13,6 +13,7 @@ namespace ringwright::postprocess {
 namespace {
 
 constexpr double kSameHead = 1e-6;  // [m]
+constexpr double kArrived = 2e-3;   // [m], from the head set: the level is there
 
 bool is_physical(const models::TwoHeadResult& r) {
   return r.Kfs > 0.0 && r.matric_flux_potential > 0.0;
@@ -76,9 +77,14 @@ std::vector<HeadPair> head_pairs(const Question& q, const TestPlan& plan, const 
     result.first = k - 1, result.second = k;
     result.kfs = runs.figure(kfs);
     result.reads = scaled(result.kfs, 1.0 / Kfs);
-    result.physical = is_physical(pair.of(runs.fine));
     pair.read(as_read, *one, *other, result);
-    promised.promise(result.kfs, kfs, Kfs);
+    const auto there = [&](std::size_t s) {
+      return std::abs(stages[s].head_to - plan.stages[s].stage.head) < kArrived;
+    };
+    result.arrived = there(k - 1) && there(k);
+    result.physical = result.arrived && is_physical(pair.of(runs.fine));
+    result.physical_as_read = result.arrived && result.physical_as_read;
+    if (result.arrived) promised.promise(result.kfs, kfs, Kfs);
     pairs.push_back(result);
   }
   worst = worse_of(worst, promised.worst());

@@ -77,9 +77,13 @@ Ladder make_ladder(const Question& q, const CompanionRuns& runs, double stop) {
     const auto over_steady = [&](const solver::TestRun& r) {
       return flow(r) / (&r == &runs.fine ? runs.steady_fine : runs.steady_coarse).ring_flow;
     };
-    if (t >= kRatesFrom * stop) {
-      worst.promise(runs.figure(flow), flow);
-      worst.promise(row.above_steady, over_steady);  // relative to the flow, not to the excess
+    // only a program can leave the ring dry
+    const bool drinks = !has_program || sample_at(runs.fine, t).ring_flow > 0.0;
+    if (t >= kRatesFrom * stop && drinks) {
+      const double least = least_flow(runs.fine, t);
+      worst.promise(runs.figure(flow), flow, least);
+      // relative to the flow, not to the excess
+      worst.promise(row.above_steady, over_steady, least / runs.steady_fine.ring_flow);
     }
     ladder.rows.push_back(std::move(row));
   }

@@ -39,7 +39,9 @@ class StageReader {
     };
     const Figure mean = runs_.figure(flow);
     reading.rate = scaled(mean, 1.0 / area_);
-    worst_.promise(mean, flow);
+    // A ring that ran dry in its last reading has no rate there that could be promised.
+    if (sample_at(runs_.fine, last.to).water.soil_flow > 0.0)
+      worst_.promise(mean, flow, least_flow(runs_.fine, last.to));
   }
 
   void read_steady(const PlannedStage& s, StageReading& reading) {

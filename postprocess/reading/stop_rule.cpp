@@ -15,6 +15,7 @@ bool within_share(const models::Record& record, std::size_t last, std::size_t n,
   double mean = 0.0;
   for (std::size_t i = last + 1 - n; i <= last; ++i)
     mean += record.rate(i) / static_cast<double>(n);
+  if (!(mean > 0.0)) return false;  // a ring that drinks nothing is not steady
   for (std::size_t i = last + 1 - n; i <= last; ++i)
     if (!(std::abs(record.rate(i) - mean) <= share * std::abs(mean))) return false;
   return true;
@@ -26,7 +27,7 @@ bool within_amount(const models::Record& record, std::size_t last, std::size_t n
     least = std::min(least, record.rate(i));
     most = std::max(most, record.rate(i));
   }
-  return most - least <= amount * (1.0 + kRounding);
+  return most > 0.0 && most - least <= amount * (1.0 + kRounding);
 }
 
 void check(const models::StopRule& rule) {

@@ -1,5 +1,6 @@
 #include "postprocess/reading/test_record.hpp"
 
+#include <algorithm>
 #include <numbers>
 
 #include "postprocess/reading/companion_runs.hpp"
@@ -18,7 +19,7 @@ models::Record record_of(const Question& q, const TestPlan& plan, const solver::
     if (run.samples.empty() || r.to > run.samples.back().time * (1 + 1e-9)) break;
     const double volume = volume_until(r.to);
     record.readings.push_back({r.to, r.to - r.from, volume - volume_until(r.from), volume,
-                               sample_at(run, r.to).water.head});
+                               std::max(0.0, sample_at(run, r.to).water.head)});
   }
   return record;
 }

@@ -10,6 +10,8 @@ const char* kind_name(FlagKind kind) {
       return "supply exceeded";
     case FlagKind::reservoir_emptied:
       return "reservoir emptied";
+    case FlagKind::ring_emptied:
+      return "ring emptied";
     case FlagKind::flow_below_gauge:
       return "flow below gauge";
     case FlagKind::surfacing:
@@ -79,6 +81,8 @@ FlagUnits units_of(FlagKind kind) {
       return {"m", "m", "1"};
     case FlagKind::reservoir_emptied:
       return {"s", "m3", "1"};
+    case FlagKind::ring_emptied:
+      return {"s", "1", "1"};
     case FlagKind::surfacing:
       return {"m3", "s", "m"};
     case FlagKind::domain_reached:

@@ -1,3 +1,5 @@
+#include <limits>
+
 #include "models/ring/lid_lift.hpp"
 #include "postprocess/reading/flags/closed_ring.hpp"
 #include "postprocess/reading/flags/flags.hpp"
@@ -10,9 +12,10 @@ void lift(const TestAsRead& test, const models::Lid& lid, std::vector<Flag>& fla
   const double highest = lid.relief_head.value_or(highest_head(test, false));
   const models::LidLift found = models::lid_lift(lid, highest, test.question.setup.ring.radius,
                                                  test.question.circumstances.ballast_factor);
-  if (found.ballast > 0.0)
-    flags.push_back(
-        {FlagKind::lid_lift, found.force, found.force - found.net_force, found.ballast});
+  // where nobody says how high the pressure can go, no ballast can be named
+  const double ballast = lid.relief_head ? found.ballast : std::numeric_limits<double>::quiet_NaN();
+  if (found.ballast > 0.0 || !lid.relief_head)
+    flags.push_back({FlagKind::lid_lift, found.force, found.force - found.net_force, ballast});
 }
 
 }  // namespace

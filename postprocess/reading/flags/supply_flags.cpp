@@ -7,6 +7,8 @@ namespace {
 
 using solver::EventKind;
 
+constexpr double kFilm = 1e-6;  // [m3], what is left where a pond has run dry
+
 bool happens(const TestAsRead& test, EventKind kind, bool outer, double from, double to) {
   return std::any_of(test.run.events.begin(), test.run.events.end(), [&](const solver::Event& e) {
     return e.kind == kind && e.outer == outer && e.time >= from && e.time <= to;
@@ -61,15 +63,42 @@ void reservoir_emptied(const TestAsRead& test, bool outer, std::vector<Flag>& fl
   }
 }
 
+// A stage or the end of a spell without water may have filled the ring with no event of its own.
+bool stands_again(const TestAsRead& test, bool outer, double since) {
+  return std::any_of(test.run.samples.begin(), test.run.samples.end(),
+                     [&](const solver::Sample& s) {
+                       return s.time > since && s.time <= test.stop * (1 + 1e-9) &&
+                              (outer ? s.outer_water : s.water).standing > kFilm;
+                     });
+}
+
+// Empty at the stop, or before its last reading was over: a fall that ends on the bare ground at
+// the stop itself has been read to its end.
+void ring_emptied(const TestAsRead& test, bool outer, std::vector<Flag>& flags) {
+  constexpr double kNever = -1.0;
+  double since = kNever;
+  for (const solver::Event& e : test.run.events) {
+    if (e.outer != outer || e.time >= test.stop * (1 - 1e-9)) continue;
+    const bool filled = e.kind == EventKind::refilled || e.kind == EventKind::head_reached ||
+                        e.kind == EventKind::reservoir_brought;
+    if (e.kind == EventKind::emptied) since = e.time;
+    if (filled) since = kNever;
+  }
+  if (since == kNever || stands_again(test, outer, since)) return;
+  flags.push_back({FlagKind::ring_emptied, since, 0.0, 0.0, outer});
+}
+
 }  // namespace
 
 void supply_flags(const TestAsRead& test, std::vector<Flag>& flags) {
   const solver::TestSetup& setup = test.question.setup;
   supply_exceeded(test, setup.program, false, flags);
   reservoir_emptied(test, false, flags);
+  ring_emptied(test, false, flags);
   if (!setup.outer_ring) return;
   supply_exceeded(test, setup.outer_program, true, flags);
   reservoir_emptied(test, true, flags);
+  ring_emptied(test, true, flags);
 }
 
 }  // namespace ringwright::postprocess

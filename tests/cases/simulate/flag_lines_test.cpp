@@ -50,13 +50,14 @@ TEST_CASE("each flag has its number, its limit and a cure", "[screen]") {
        {"Outer ring: ", "by up to 3.0 cm of the 10.0 cm", "bigger hose"}},
       {{FlagKind::reservoir_emptied, 5400.0, 0.02},
        {"tank of 20 L is empty after 1 h 30 min", "larger one"}},
+      {{FlagKind::ring_emptied, 3600.0, 0.0}, {"empty since 1 h", "not a rate of the soil"}},
       {{FlagKind::flow_below_gauge, 2.5, 10.0},
        {"2.5 divisions of the gauge, 10 are wanted", "read every 40 min"}},
       {{FlagKind::evaporation_share, 0.31, 0.1}, {"is 31 %", "limit 10 %", "Cover the pond"}},
       {{FlagKind::stop_rule_not_met, 0.2, 0.0}, {"20 % above steady", "Allow more time"}},
       {{FlagKind::stop_rule_not_met, -0.2, 0.0}, {"20 % below steady"}},
       {{FlagKind::domain_reached, 8.0, 0.0}, {"8.0 m deep", "in doubt"}},
-      {{FlagKind::sealed_temperature, 47e-6, 20e-6}, {"by 47 mL", "(20 mL)", "Shade"}}};
+      {{FlagKind::sealed_temperature, 47e-6, 20e-6}, {"by 47 mL", "200 mL", "Shade"}}};
   for (const auto& [flag, parts] : expected) {
     const std::string line = lines_of({flag});
     CHECK_THAT(line, Catch::StartsWith(" ! "));

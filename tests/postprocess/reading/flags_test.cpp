@@ -120,11 +120,25 @@ TEST_CASE("flag: surfacing", "[reading]") {
   CHECK_FALSE(t.flag(FlagKind::surfacing));
 }
 
+TEST_CASE("flag: ring emptied", "[reading]") {
+  using solver::EventKind;
+  Quiet t;
+  t.run.events = {event(3000.0, EventKind::emptied, 0.0)};
+  for (auto& s : t.run.samples) s.water.standing = s.time < 3000.0 ? 1e-3 : 0.0;
+  const auto f = t.flag(FlagKind::ring_emptied);
+  REQUIRE(f);
+  CHECK(f->value == 3000.0);
+  CHECK_FALSE(t.flag(FlagKind::ring_emptied, 2700.0));  // stopped before
+  t.run.samples.back().water.standing = 1e-3;           // filled again
+  CHECK_FALSE(t.flag(FlagKind::ring_emptied));
+}
+
 // H/(2 d) against (rho_s/rho_w - 1)(1 - porosity), Terzaghi's critical gradient; grains of 2650 and
-// water of 998.2 kg/m3 at 20 degC (textbook).
+// water of 998.2 kg/m3 at 20 degC (textbook); flagged from two thirds of it on (common practice, no
+// source).
 TEST_CASE("flag: piping", "[reading]") {
   Quiet t;
-  const double critical = (2650.0 / 998.2 - 1.0) * (1.0 - t.question.setup.soil.theta_s);
+  const double critical = (2650.0 / 998.2 - 1.0) * (1.0 - t.question.setup.soil.theta_s) / 1.5;
   t.question.setup.program.stages[0].head = 0.99 * critical * 0.20;
   CHECK_FALSE(t.flag(FlagKind::piping));
   t.question.setup.program.stages[0].head = 1.01 * critical * 0.20;

@@ -196,3 +196,25 @@ TEST_CASE("readings are held against the layer at the foot, or what is named", "
   CHECK(named.ladder.back().reads.rate_as_kfs.value ==
         Approx(named.ladder.back().rate.value / 1e-5));
 }
+
+// A ring that runs dry within the last reading has no rate there; asking for its accuracy would
+// refine without end.
+TEST_CASE("a ring that runs dry in the last reading is answered all the same", "[reading]") {
+  Question q;
+  q.setup.soil = solver::class_soil("loam");
+  q.setup.initial_head = -3.0;
+  q.setup.ring = {0.15, 0.10};
+  q.setup.duration = 6 * 3600.0;
+  q.setup.program.stages = {{.head = 0.10, .duration = q.setup.duration}};
+  q.setup.program.supply.reservoir = 9e-3;
+  q.setup.program.supply.largest_rate = 1e-3 / 60;
+  q.reading_interval = 600.0;
+  q.assumed_alpha_star = 12.0;
+  q.find_influence = false;
+  const Answer a = answer(q);
+  CHECK(a.accuracy_met);
+  CHECK(a.run.statistics.cells < 5000);
+  CHECK(a.water.soil.value == Approx(9e-3).epsilon(0.01));
+  CHECK(std::any_of(a.flags.begin(), a.flags.end(),
+                    [](const Flag& f) { return f.kind == FlagKind::ring_emptied; }));
+}
