@@ -19,6 +19,8 @@ using postprocess::LadderRow;
 using postprocess::ReadsX;
 
 std::string first_sentences(const Case& what, const Answer& answer, const LadderRow& stop) {
+  if (!(stop.rate.value > 0.0))
+    return stop_clause(answer, stop.time) + " " + no_rate_words(what, answer);
   return fmt::format(
       "{} The form will say {} mm/h ({} in/h); the true Kfs is {}. Read as Kfs that rate is {} "
       "times the true one; by the one-head formula with alpha* {:g} 1/cm, {} times.",

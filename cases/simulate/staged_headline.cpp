@@ -2,6 +2,8 @@
 
 #include <fmt/format.h>
 
+#include <algorithm>
+
 #include "cases/simulate/paragraph.hpp"
 #include "cases/simulate/printed_number.hpp"
 #include "cases/simulate/stop_clause.hpp"
@@ -53,14 +55,24 @@ std::string pair_sentences(const Case& what, const Answer& answer, const HeadPai
       rounded(pair.reads.value), choice_words(answer, pair), as_read_words(pair));
 }
 
+bool has_arrived(const Answer& answer) {
+  return std::any_of(answer.pairs.begin(), answer.pairs.end(),
+                     [](const HeadPair& pair) { return pair.arrived; });
+}
+
 std::string rate_sentences(const Case& what, const Answer& answer) {
   const double rate = rate_at_stop(answer).value;
   std::string text;
   if (!answer.pairs.empty()) {
     text =
-        "The two-head formula gives no usable Kfs from any pair: the flow had not settled, or "
-        "the heads are too close. ";
+        has_arrived(answer)
+            ? "The two-head formula gives no usable Kfs from any pair: the flow had not settled, "
+              "or "
+              "the heads are too close. "
+            : "The two-head formula gives no Kfs: at the end of a stage the level had not come to "
+              "the head set. ";
   }
+  if (!(rate > 0.0)) return text + no_rate_words(what, answer);
   return text + fmt::format(
                     "The form will say {}, the rate of the last reading; the true Kfs is {}. Read "
                     "as Kfs that rate is {} times the true one.",

@@ -15,4 +15,10 @@ std::string true_kfs_words(const Case& what, const postprocess::Answer& answer) 
                      mm_per_hour(Kfs * answer.question.viscosity_ratio));
 }
 
+std::string no_rate_words(const Case& what, const postprocess::Answer& answer) {
+  return "The last reading is no rate of the soil and gives no Kfs: the ring was empty, or water "
+         "came up in it. The true Kfs is " +
+         true_kfs_words(what, answer) + ".";
+}
+
 }  // namespace ringwright::cases

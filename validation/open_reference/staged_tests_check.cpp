@@ -14,7 +14,7 @@
 #include "solver/ground_materials.hpp"
 #include "solver/resolution.hpp"
 #include "solver/steady_ring.hpp"
-#include "validation/open_reference/open_case.hpp"
+#include "validation/open_reference/staged_setups.hpp"
 
 using namespace ringwright;
 using namespace ringwright::validation;
@@ -22,57 +22,11 @@ using nlohmann::json;
 
 namespace {
 
-constexpr double kMinute = 60.0;
 // Of the reference's own Kfs, which is made from two of its flows (uncertainty 0.05 % each, times
 // the amplification of the pair) and printed to three decimals: 0.23 % for 2-1 and 2-3.
 constexpr double kKfsUncertainty = 0.003;
 // Answers begin finer than the accuracy asked for (postprocess/reading/answer_question.cpp).
 constexpr double kBeginAt = 0.36;
-
-json reference() { return reference_of("open_reference"); }
-
-models::Soil soil_of(const json& all, const std::string& name) {
-  const json s = all["soils"][name];
-  return {std::make_shared<models::VanGenuchten>(s["alpha_per_cm"].get<double>() / kCentimetre,
-                                                 s["n"].get<double>(), 0.5, 0.0),
-          s["theta_r"], s["theta_s"], s["Ks_cm_per_h"].get<double>() * kCentimetre / kHour};
-}
-
-solver::TestSetup two_head_setup(const json& all) {
-  const json c = all["cases"]["P11"];
-  solver::TestSetup s;
-  s.soil = soil_of(all, c["soil"]);
-  s.initial_head = c["h0_cm"].get<double>() * kCentimetre;
-  s.ring = {c["a_cm"].get<double>() * kCentimetre, c["d_cm"].get<double>() * kCentimetre};
-  // what the reference states in words
-  const double heads[] = {0.05, 0.15, 0.05, 0.15};
-  const double minutes[] = {40, 20, 20, 20};
-  double end = 0.0;
-  for (int k = 0; k < 4; ++k) {
-    s.program.stages.push_back(
-        {.head = heads[k], .duration = minutes[k] * kMinute, .down = models::StepDown::bail});
-    s.times.push_back(end += minutes[k] * kMinute);
-  }
-  s.duration = end;
-  return s;
-}
-
-solver::TestSetup double_ring_setup(const json& all) {
-  const json c = all["cases"]["D1a"];
-  const auto length = [&](const char* key) { return c[key].get<double>() * kCentimetre; };
-  solver::TestSetup s;
-  s.soil = soil_of(all, c["soil"]);
-  s.initial_head = length("h0_cm");
-  s.ring = {length("inner_a_cm"), length("d_cm")};
-  s.outer_ring = models::SingleRing{length("outer_a_cm"), length("d_cm")};
-  s.pond_head = length("H_cm");
-  for (const auto& row : c["rows"]) {
-    const double t = row["time_h"].get<double>() * kHour;
-    if (s.times.empty() || t > s.times.back()) s.times.push_back(t);
-  }
-  s.duration = s.times.back();
-  return s;
-}
 
 solver::Resolution resolution_of(const solver::TestSetup& s, double accuracy) {
   const solver::CurveTable table(s.soil.curves);
@@ -95,9 +49,12 @@ void compare(const char* what, double ours, double reference, double accuracy, d
 }  // namespace
 
 TEST_CASE("open reference: two-head ring", "[reference]") {
-  const json all = reference(), c = all["cases"]["P11"];
+  const json all = reference_of("open_reference"), c = all["cases"]["P11"];
   for (double accuracy : {0.01, 0.003}) {
-    const solver::TestSetup setup = two_head_setup(all);
+    solver::TestSetup setup = reference_two_heads(all);
+    double end = 0.0;
+    for (const models::Stage& stage : setup.program.stages)
+      setup.times.push_back(end += stage.duration);
     const solver::TestRun run = solver::run_test(setup, resolution_of(setup, accuracy));
     REQUIRE(run.samples.size() == 4);
     const double area = std::numbers::pi * setup.ring.radius * setup.ring.radius;
@@ -144,9 +101,13 @@ TEST_CASE("open reference: two-head ring", "[reference]") {
 }
 
 TEST_CASE("open reference: double ring", "[reference]") {
-  const json all = reference(), c = all["cases"]["D1a"];
+  const json all = reference_of("open_reference"), c = all["cases"]["D1a"];
   for (double accuracy : {0.01, 0.003}) {
-    const solver::TestSetup setup = double_ring_setup(all);
+    solver::TestSetup setup = reference_double_ring(all);
+    for (const json& row : c["rows"]) {
+      const double t = row["time_h"].get<double>() * kHour;
+      if (setup.times.empty() || t > setup.times.back()) setup.times.push_back(t);
+    }
     const solver::Resolution r = resolution_of(setup, accuracy);
     const solver::TestRun run = solver::run_test(setup, r);
     for (const json& row : c["rows"]) {

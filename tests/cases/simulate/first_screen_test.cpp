@@ -84,6 +84,15 @@ TEST_CASE("a class name shows both tables, each by its name", "[screen]") {
 )"));
 }
 
+TEST_CASE("a last reading in which nothing went in gives no rate and no Kfs", "[screen]") {
+  auto simulation = test::simulation_of(1);
+  for (auto& row : simulation.tests[0].answers[0].ladder)
+    if (row.stops_here) row.rate.value = -1e-6;
+  const std::string screen = screen_of(simulation);
+  CHECK_THAT(screen, Contains("The last reading is no rate of the soil and gives no Kfs"));
+  CHECK_THAT(screen, !Contains("The form will say"));
+}
+
 TEST_CASE("a table that was not computed is not forgotten", "[screen]") {
   auto simulation = test::simulation_of(2);
   simulation.tests[0].answers.pop_back();
