@@ -70,8 +70,9 @@ struct CompanionWork {
 /// What the error of a rate read at t is held against at least [m3/s]: a twentieth of the mean flow
 /// up to then. A ring that runs dry within a reading has a rate near nothing there, which no mesh
 /// makes relatively exact.
+constexpr double kLeastFlow = 0.05;
 inline double least_flow(const solver::TestRun& run, double t) {
-  return 0.05 * volume_at(run, t) / t;
+  return kLeastFlow * volume_at(run, t) / t;
 }
 
 /// Runs all of them; with more than one thread side by side, with the same result.

@@ -23,7 +23,7 @@ OuterReading outer_reading(const Question& q, const TestPlan& plan, const Compan
   reading.rate = scaled(mean, 1.0 / area);
   // as least_flow(), of the annulus
   if (sample_at(runs.fine, last.to).outer_water.soil_flow > 0.0)
-    promised.promise(mean, flow, 0.05 * until(runs.fine, last.to) / last.to);
+    promised.promise(mean, flow, kLeastFlow * until(runs.fine, last.to) / last.to);
   if (const SteadyState* state = runs.steady_state(plan.stages[last.stage].held)) {
     const Figure steady = runs.steady_outer_flow(*state);
     reading.steady_rate = scaled(steady, 1.0 / area);

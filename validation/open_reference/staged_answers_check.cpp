@@ -24,10 +24,6 @@ using nlohmann::json;
 
 namespace {
 
-// Of the reference's own Kfs, which is made from two of its flows (uncertainty 0.05 % each, times
-// the amplification of the pair) and printed to three decimals.
-constexpr double kKfsUncertainty = 0.004;
-
 postprocess::Question question_of(const solver::TestSetup& setup, double interval,
                                   double accuracy) {
   postprocess::Question q;

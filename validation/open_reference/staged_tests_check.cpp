@@ -22,9 +22,6 @@ using nlohmann::json;
 
 namespace {
 
-// Of the reference's own Kfs, which is made from two of its flows (uncertainty 0.05 % each, times
-// the amplification of the pair) and printed to three decimals: 0.23 % for 2-1 and 2-3.
-constexpr double kKfsUncertainty = 0.003;
 // Answers begin finer than the accuracy asked for (postprocess/reading/answer_question.cpp).
 constexpr double kBeginAt = 0.36;
 
